@@ -1,0 +1,72 @@
+/** A stretch of text that says one thing, and where it stands in the whole. */
+export interface Clause {
+  text: string;
+  /** The same in lower case, typographic signs made plain, of the same length. */
+  plain: string;
+  start: number;
+  /** What it is about, when that is not this operation on this eye. */
+  about: 'this-operation' | 'elsewhere';
+}
+
+const plainSigns: Readonly<Record<string, string>> = {
+  '’': "'",
+  '‘': "'",
+  '“': '"',
+  '”': '"',
+  '–': '-',
+  '−': '-',
+  '‑': '-',
+  '\u00a0': ' ',
+  '\u202f': ' ',
+  '×': 'x',
+  '₃': '3',
+  '₆': '6',
+  '₂': '2',
+  '₈': '8',
+};
+
+/** Lower case with plain signs; every character keeps its place, so that offsets stay true. */
+export const plainText = (text: string): string =>
+  Array.from(text, (sign) => {
+    const plain = (plainSigns[sign] ?? sign).toLowerCase();
+    return plain.length === sign.length ? plain : sign;
+  }).join('');
+
+/** A full stop inside a number, an abbreviation or an initial ends nothing. */
+const boundary =
+  /(?<!\b(?:approx|dr|mr|mrs|ms|prof|no|vs|e\.g|i\.e|ca|st))[.!?](?=\s|$)|[;\n]|,? (?=but |whereas |although |though )|, (?=while |which )/g;
+
+/** Words that move a clause to the other eye, another time, a wish, a condition or somebody else's mouth. */
+const elsewhere: readonly RegExp[] = [
+  /\b(?:fellow|contralateral|other|opposite|second|unoperated|better|good|only)(?: (?:right|left))? eye\b|\bfellow\b/,
+  /\b(?:both eyes|either eye|each eye|bilateral(?:ly)?)\b/,
+  /\b(?:previous(?:ly)?|prior|past|historic(?:al(?:ly)?)?|formerly|earlier|ago|history|had (?:been|already|undergone|had)|since childhood|years? before|last (?:year|month|time)|in (?:19|20)\d\d|family)\b/,
+  /\b(?:if|unless|should (?:the|it|there|any|he|she|they|a|pressure|re)|in case|in the event|would|could|might|may|risk of|possib(?:le|ly|ility)|in theory|otherwise)\b/,
+  /\b(?:consider(?:ed|ing)?|discussed|option|alternative|rather than|instead of|as opposed to|planned (?:but|initially)|initially planned|original plan|was planned|had planned|intended)\b/,
+  /\b(?:referral|letter|referrer|referred|optometrist|patient) (?:\w+ )?(?:states?|said|says|reported|reports|described|describes|wrote|thought|mentioned|believed|suggested)\b/,
+  /\b(?:according to|quoted?|reportedly|labelled|literature|textbook|studies|published|guidelines?)\b/,
+];
+
+const quoted = /"[^"]*"/g;
+
+/** Splits text into clauses. What stands in quotation marks belongs to whoever said it. */
+export const clausesOf = (text: string): Clause[] => {
+  const plain = plainText(text).replace(quoted, (words) => ' '.repeat(words.length));
+  const clauses: Clause[] = [];
+  let start = 0;
+  const add = (end: number) => {
+    const piece = plain.slice(start, end);
+    if (piece.trim() !== '') {
+      clauses.push({
+        text: text.slice(start, end),
+        plain: piece,
+        start,
+        about: elsewhere.some((words) => words.test(piece)) ? 'elsewhere' : 'this-operation',
+      });
+    }
+    start = end;
+  };
+  for (const match of plain.matchAll(boundary)) add(match.index + match[0].length);
+  add(plain.length);
+  return clauses;
+};

@@ -1,0 +1,42 @@
+const words = [
+  'zero',
+  'one',
+  'two',
+  'three',
+  'four',
+  'five',
+  'six',
+  'seven',
+  'eight',
+  'nine',
+  'ten',
+  'eleven',
+  'twelve',
+] as const;
+
+/** Pattern of a number in figures, decimal point or comma. */
+export const FIGURE = String.raw`\d+(?:[.,]\d+)?`;
+
+/** Pattern of a number in figures or, up to twelve, in words. */
+export const NUMBER = `(?:${FIGURE}|${words.slice(1).join('|')})`;
+
+/** Value of what `NUMBER` matches. */
+export const numberOf = (written: string): number => {
+  const index = (words as readonly string[]).indexOf(written);
+  return index >= 0 ? index : Number(written.replace(',', '.'));
+};
+
+/** Equal as written: 5 and 5.0 are, 5 and 5.5 are not. */
+export const sameNumber = (a: number, b: number): boolean => Math.abs(a - b) < 0.005;
+
+/** Whether a negation governs what stands at this place of a clause. */
+export const negatedAt = (plain: string, index: number): boolean =>
+  /\b(?:no|not|never|without|nor|neither|none|avoid(?:ed|ing)?|rather than|instead of|declined|omitted|free of|absence of|ruled out|excluded?)\b(?:[\s,]+[\w'-]+){0,5}[\s(]*$/.test(
+    plain.slice(Math.max(0, index - 60), index),
+  );
+
+/** Whether the words right after a place negate it: "drainage was not performed", "buckle: none". */
+export const negatedAfter = (plain: string, end: number): boolean =>
+  /^(?:\s+[\w-]+){0,2}?(?:\s+(?:was|were|is|are|has been|had been))?\s*(?:not (?:been )?(?:\w+)|none|unnecessary|omitted|avoided|deferred|nil)\b|^\s*[:-]\s*(?:none|no|nil)\b/.test(
+    plain.slice(end, end + 60),
+  );

@@ -1,0 +1,97 @@
+import { deny, type ProseFinding, type Reader, spanOf } from '../finding.ts';
+import { FIGURE, negatedAfter, negatedAt, numberOf, sameNumber } from '../numbers.ts';
+
+const names: readonly { agent: string; words: string }[] = [
+  { agent: 'SF6', words: 'sf-?6|sulphur hexafluoride|sulfur hexafluoride' },
+  { agent: 'C2F6', words: 'c2f6|hexafluoroethane|perfluoroethane' },
+  { agent: 'C3F8', words: 'c3f8|octafluoropropane|perfluoropropane' },
+  { agent: 'heavy-oil', words: 'heavy (?:silicone )?oil' },
+  {
+    agent: 'silicone-oil',
+    words:
+      '(?<!heavy )(?:light )?silicone oil|\\boil (?:tamponade|fill)|(?:1[,. ]?000|1[,. ]?300|5[,. ]?000) ?c(?:st|s|entistokes?)(?: oil)?',
+  },
+  {
+    agent: 'air',
+    words: 'air (?:tamponade|bubble|fill)|(?:left|leaving|filled) (?:with|under|in) air|under air(?! fluid)',
+  },
+];
+
+const allNames = names.map(({ words }) => words).join('|');
+const anyAgent = new RegExp(`(?<![\\w])(?:${allNames})(?![\\w-])`, 'g');
+const agentOf = (words: string) => names.find((name) => new RegExp(`^(?:${name.words})$`).test(words))?.agent;
+const percentBefore = new RegExp(
+  `(${FIGURE}) ?(?:%|per ?cent)(?: (?:of|isoexpansile|mixture of))? (?:${allNames})(?![\\w])`,
+  'g',
+);
+const percentAfter = new RegExp(
+  `(?:${allNames})(?:,| gas)?(?: at| of| mixture of| mixed to| to| diluted to| in a concentration of| \\(| -)? ?\\(?(${FIGURE}) ?(?:%|per ?cent)(?! (?:of|fill))`,
+  'g',
+);
+
+const recordedName: Readonly<Record<string, string>> = {
+  none: 'no tamponade',
+  air: 'air',
+  'silicone-oil': 'silicone oil',
+  'heavy-oil': 'heavy silicone oil',
+};
+
+/** Air is exchanged on the way, oil is taken out of old cases: those words do not name what was left in. */
+const onTheWay =
+  /(?:air[- ]fluid|fluid[- ]air|air[- ](?:oil|gas)|exchange(?:d)? (?:for|of) air|remov(?:al|ed) of|oil[- ](?:remov|out)|ex-?oil)/;
+
+const readAgent: Reader = (clause, record) => {
+  const agent = record.tamponade?.agent;
+  if (agent === undefined) return [];
+  const recorded = recordedName[agent] ?? agent;
+  const found: ProseFinding[] = [];
+  for (const match of clause.plain.matchAll(anyAgent)) {
+    const named = agentOf(match[0]);
+    const around = clause.plain.slice(Math.max(0, match.index - 14), match.index + match[0].length);
+    if (named === undefined || onTheWay.test(around)) continue;
+    const negated =
+      negatedAt(clause.plain, match.index) || negatedAfter(clause.plain, match.index + match[0].length);
+    if (
+      negated
+        ? named === agent && /\b(?:no|without)\s+(?:\w+\s+)?$/.test(clause.plain.slice(0, match.index))
+        : named !== agent
+    ) {
+      found.push(deny('agent', clause, spanOf(match), 'tamponade.agent', recorded));
+    }
+  }
+  return found;
+};
+
+const readConcentration: Reader = (clause, record) => {
+  const percent = record.tamponade?.concentrationPercent;
+  const agent = record.tamponade?.agent;
+  if (typeof percent !== 'number' || agent === undefined) return [];
+  return [...clause.plain.matchAll(percentBefore), ...clause.plain.matchAll(percentAfter)]
+    .filter(
+      (match) => !negatedAt(clause.plain, match.index) && !sameNumber(numberOf(match[1] ?? ''), percent),
+    )
+    .map((match) =>
+      deny('concentration', clause, spanOf(match), 'tamponade.concentrationPercent', `${percent}%`),
+    );
+};
+
+const noTamponade =
+  /\b(?:no|without(?: any)?) (?:gas|oil|tamponade|internal tamponade|intraocular (?:gas|tamponade))\b(?! (?:leak|bubble in|in the anterior|under|escape|was lost))/g;
+
+const readNone: Reader = (clause, record) => {
+  const agent = record.tamponade?.agent;
+  if (agent === undefined || agent === 'none') return [];
+  return [...clause.plain.matchAll(noTamponade)]
+    .filter(
+      (match) =>
+        !(match[0].endsWith('oil') && !agent.endsWith('oil')) &&
+        !(match[0].endsWith('gas') && agent.endsWith('oil')),
+    )
+    .map((match) => deny('negation', clause, spanOf(match), 'tamponade.agent', recordedName[agent] ?? agent));
+};
+
+/** Agent left in the eye and its concentration. */
+export const readTamponade: Reader = (clause, record) =>
+  clause.about === 'elsewhere'
+    ? []
+    : [...readAgent(clause, record), ...readConcentration(clause, record), ...readNone(clause, record)];
