@@ -1,0 +1,14 @@
+import type { UnitView } from '../../domain/api.ts';
+import { checkRecord } from '../../domain/checks/engine.ts';
+import { draftNote } from '../../domain/drafting/draft.ts';
+import { mergeSheet } from '../../domain/drafting/merge.ts';
+import { numbersOf } from '../../domain/physics/numbers.ts';
+import type { Derivers } from './desk-store.ts';
+
+/** The domain's own answers, in the browser. The server asks the same again on save and at signature. */
+export const deriversFor = (unit: UnitView): Derivers => ({
+  check: checkRecord,
+  draft: (record) => draftNote(record, { unit }),
+  merge: mergeSheet,
+  figures: numbersOf,
+});

@@ -1,0 +1,31 @@
+import { memo } from 'react';
+
+interface Props {
+  id: string;
+  label: string;
+  options: Readonly<Record<string, string>>;
+  value: string | undefined;
+  onChange: (value: string | undefined) => void;
+  describedBy?: string | undefined;
+  readOnly?: boolean;
+}
+
+/** One of many values. The empty line at the top makes the field absent again. */
+export const Picker = memo(({ id, label, options, value, onChange, describedBy, readOnly }: Props) => (
+  <select
+    id={id}
+    className="case-box case-picker"
+    aria-label={label}
+    aria-describedby={describedBy}
+    value={value ?? ''}
+    disabled={readOnly}
+    onChange={(event) => onChange(event.target.value === '' ? undefined : event.target.value)}
+  >
+    <option value="">not recorded</option>
+    {Object.entries(options).map(([key, text]) => (
+      <option key={key} value={key}>
+        {text}
+      </option>
+    ))}
+  </select>
+));
