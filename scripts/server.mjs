@@ -72,7 +72,7 @@ const serve = async (request, answer) => {
  * @param {import('node:http').IncomingMessage} request
  * @param {Answer} answer
  * @param {number} status
- * @param {string} message
+ * @param {string} [message]
  */
 const refuse = (request, answer, status, message) => {
   if (!request.complete) {

@@ -1,4 +1,5 @@
 import { spawn } from 'node:child_process';
+import { readFileSync } from 'node:fs';
 import { createServer } from 'node:net';
 import { fileURLToPath } from 'node:url';
 
@@ -91,6 +92,16 @@ export const freePort = () =>
     });
   });
 
+/** @param {number} pid */
+const parentOf = (pid) => {
+  try {
+    // "PID (NAME) STATE PARENT ...", and a name can hold anything.
+    return readFileSync(`/proc/${pid}/stat`, 'utf8').split(') ').at(-1)?.split(' ')[1];
+  } catch {
+    return undefined;
+  }
+};
+
 /**
  * Keeps what was started and stops it in reverse order, once: on Ctrl-C, on SIGTERM, when the terminal or the npm
  * above goes away, and at the end.
@@ -123,9 +134,11 @@ export const createStarted = () => {
   process.on('SIGHUP', () => stopAndExit(129));
 
   if (process.env.npm_lifecycle_event !== undefined) {
-    const parent = process.ppid;
+    // npm puts a shell in between, which outlives it.
+    const line = () => `${process.ppid} ${parentOf(process.ppid)}`;
+    const atStart = line();
     setInterval(() => {
-      if (process.ppid !== parent) stopAndExit(143);
+      if (line() !== atStart) stopAndExit(143);
     }, 1000).unref();
   }
 

@@ -1,4 +1,4 @@
-/** @typedef {{ status: 400 | 403 | 405, message: string }} Refusal */
+/** @typedef {{ status: 400 | 403 | 405, message?: string }} Refusal without a message, the usual words will do */
 
 /**
  * What this server answers to.
@@ -49,10 +49,10 @@ const comesFromOurPage = (headers, host, addresses) => {
  * @returns {Refusal | undefined}
  */
 export const refusalOf = ({ method = '', url = '', headers }, addresses) => {
-  if (!methods.has(method)) return { status: 405, message: 'This server does not know that method.' };
+  if (!methods.has(method)) return { status: 405 };
   // A full or a double-slashed target would be read as another host further in.
   if (!url.startsWith('/') || url.startsWith('//') || url.includes('\\')) {
-    return { status: 400, message: 'This address cannot be read. Check how it is written.' };
+    return { status: 400 };
   }
   const host = withoutUsualPort(headers.host ?? '');
   if (!addresses.hosts.has(host)) {
