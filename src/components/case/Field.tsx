@@ -31,6 +31,10 @@ interface Props {
   compact?: boolean;
   /** The unit is printed by another field of the row. */
   unitless?: boolean;
+  /** Shorter labels of options, where the row says the rest. */
+  short?: Readonly<Record<string, string>> | undefined;
+  /** Room for the box, in characters. */
+  size?: number | undefined;
 }
 
 const yesNo = { yes: 'yes', no: 'no' };
@@ -41,7 +45,7 @@ const optionsOf = (spec: FieldSpec) => ('options' in spec ? spec.options : noOpt
 
 /** Room that a box needs, in characters. */
 const sizeOf = (spec: FieldSpec): number => {
-  if (spec.kind === 'number') return spec.unit === 'o’clock' ? 5 : Math.max(3, String(spec.max).length);
+  if (spec.kind === 'number') return spec.unit === 'o’clock' ? 5 : Math.max(4, String(spec.max).length);
   if (spec.kind === 'date') return 11;
   if (spec.kind === 'date-time') return 18;
   return spec.kind === 'numbers' ? 6 : 10;
@@ -81,7 +85,7 @@ const shower = (spec: FieldSpec) => (value: unknown) => {
   return spec.kind === 'date-time' ? showDateTime(value) : showText(value);
 };
 
-const Box = ({ spec, path, compact, unitless }: Props) => {
+const Box = ({ spec, path, compact, unitless, size }: Props) => {
   const { store, readOnly } = useDeskTools();
   const value = useDesk((state) => valueAt(state.record, path));
   const bad = useDesk((state) => state.bad[path]);
@@ -105,35 +109,41 @@ const Box = ({ spec, path, compact, unitless }: Props) => {
       readOnly={readOnly}
       describedBy={describedBy}
       {...(spec.kind === 'number' && spec.unit !== '' && unitless !== true ? { unit: spec.unit } : {})}
-      {...(isText && compact !== true ? {} : { size: sizeOf(spec) })}
+      {...(isText && compact !== true ? {} : { size: size ?? sizeOf(spec) })}
     />
   );
 };
 
-const Choice = ({ spec, path, compact }: Props) => {
+const Choice = ({ spec, path, compact, short }: Props) => {
   const { store, readOnly } = useDeskTools();
   const value = useDesk((state) => valueAt(state.record, path));
   const describedBy = useDesk((state) => state.described.get(path));
   const isYesNo = spec.kind === 'yes-no';
-  const options = useMemo(() => (isYesNo ? yesNo : { ...optionsOf(spec), ...spec.words }), [isYesNo, spec]);
+  const options = useMemo(
+    () => (isYesNo ? yesNo : { ...optionsOf(spec), ...spec.words, ...short }),
+    [isYesNo, spec, short],
+  );
   const chosen = isYesNo ? (value === undefined ? undefined : value === true ? 'yes' : 'no') : value;
   const onChange = useCallback(
     (next: string | undefined) => store.record(path, isYesNo && next !== undefined ? next === 'yes' : next),
     [store, path, isYesNo],
   );
   const labels = Object.values(options);
-  const asButtons = isYesNo || (labels.length <= 5 && compact !== true && labels.join('').length <= 72);
-  const Control = asButtons ? Segments : Picker;
-  return (
-    <Control
-      id={path}
-      label={spec.title}
-      options={options}
-      value={typeof chosen === 'string' ? chosen : undefined}
-      onChange={onChange}
-      describedBy={describedBy}
-      readOnly={readOnly}
-    />
+  const room = compact === true ? 20 : 72;
+  const asButtons = isYesNo || (labels.length <= 5 && labels.join('').length <= room);
+  const shared = {
+    id: path,
+    label: spec.title,
+    options,
+    value: typeof chosen === 'string' ? chosen : undefined,
+    onChange,
+    describedBy,
+    readOnly,
+  };
+  return asButtons ? (
+    <Segments {...shared} />
+  ) : (
+    <Picker {...shared} empty={compact === true ? `${spec.title.toLowerCase()} …` : 'not recorded'} />
   );
 };
 
@@ -173,7 +183,7 @@ const Control = ({ spec, ...rest }: Props) => {
 };
 
 /** One field of the record: its control, the words that may stand in place of a value, and its flag. */
-export const Field = memo(({ spec, path, compact = false, unitless = false }: Props) => {
+export const Field = memo(({ spec, path, compact = false, unitless = false, short, size }: Props) => {
   const level = useDesk((state) => state.levels.get(path));
   const isLit = useDesk((state) => state.lit.includes(path));
   const standsAlone = spec.kind === 'choice' || spec.kind === 'yes-no' || spec.kind === 'words';
@@ -181,11 +191,11 @@ export const Field = memo(({ spec, path, compact = false, unitless = false }: Pr
   return (
     <span className="case-field" data-path={path} data-level={level} data-lit={isLit || undefined}>
       {hasWords && (spec.kind === 'group' || spec.kind === 'choices') && (
-        <WordButtons spec={spec} path={path} />
+        <WordButtons spec={spec} path={path} compact={compact} />
       )}
-      <Control spec={spec} path={path} compact={compact} unitless={unitless} />
+      <Control spec={spec} path={path} compact={compact} unitless={unitless} short={short} size={size} />
       {hasWords && spec.kind !== 'group' && spec.kind !== 'choices' && (
-        <WordButtons spec={spec} path={path} />
+        <WordButtons spec={spec} path={path} compact={compact} />
       )}
     </span>
   );

@@ -40,6 +40,8 @@ const RowLine = memo(({ row, fields, path }: { row: Row; fields: readonly FieldS
               spec={spec}
               path={`${path}.${name}`}
               compact={compact}
+              short={row.short}
+              size={row.sizes?.[name]}
               unitless={row.unitless?.includes(name) === true}
             />
           </span>

@@ -8,13 +8,13 @@ import { StageList } from './StageList.tsx';
 import { UnrolledGlobe } from './UnrolledGlobe.tsx';
 import { useDesk, useDeskTools } from './use-desk.ts';
 
-const boxes = 'input[type="text"], input[type="radio"], select';
-const stops = 'input:not(:disabled), select:not(:disabled), textarea, button:not(:disabled)';
+const boxes = 'input, select';
+const stops = 'input:not(:disabled, [tabindex="-1"]), select:not(:disabled), textarea, button:not(:disabled)';
 
 /** Enter goes on to the next field, as Tab does; a row of buttons is one stop. */
 const goOn = (form: HTMLElement, from: HTMLElement) => {
   const all = [...form.querySelectorAll<HTMLElement>(stops)];
-  const group = from.closest('[role="radiogroup"]');
+  const group = from.closest('[role="radiogroup"], .case-toggles');
   const rest = all
     .slice(all.indexOf(from) + 1)
     .filter((element) => group === null || !group.contains(element));

@@ -19,7 +19,8 @@ export const SheetPaper = ({ sheet, marks }: { sheet: Sheet; marks: StatementMar
                 data-statement={id}
                 data-origin={origin}
               >
-                {text}
+                <span className="words">{text}</span>
+                <span className="gap"> </span>
               </span>
             ))}
           </p>

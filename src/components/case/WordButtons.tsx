@@ -2,8 +2,16 @@ import type { FieldSpec } from '../../domain/record/field-tree.ts';
 import { type FieldPath, valueAt } from '../../domain/record/paths.ts';
 import { useDesk, useDeskTools } from './use-desk.ts';
 
+interface Props {
+  spec: FieldSpec;
+  path: FieldPath;
+  compact?: boolean;
+}
+
+const shortWords: Readonly<Record<string, string>> = { 'not-applicable': 'n/a' };
+
 /** "None", "not applicable" and their like: said by a press, taken back by another. */
-export const WordButtons = ({ spec, path }: { spec: FieldSpec; path: FieldPath }) => {
+export const WordButtons = ({ spec, path, compact = false }: Props) => {
   const { store, readOnly } = useDeskTools();
   const value = useDesk((state) => {
     const found = valueAt(state.record, path);
@@ -19,7 +27,7 @@ export const WordButtons = ({ spec, path }: { spec: FieldSpec; path: FieldPath }
       disabled={readOnly}
       onClick={() => store.record(path, value === word ? undefined : word)}
     >
-      {label}
+      {compact ? (shortWords[word] ?? label) : label}
     </button>
   ));
 };

@@ -77,9 +77,10 @@ export const placeFlags = (flags: readonly Flag[], sheet: Sheet): PlacedFlag[] =
     });
     if (about !== undefined) return { flag, beside: about.id, underlaid: true };
     const first = flag.fields[0] ?? '';
-    const near = best(statements, (statement) =>
-      Math.max(0, ...statement.reads.map((read) => sharedKeys(first, read))),
-    );
+    const near = best(statements, (statement) => {
+      const shared = Math.max(0, ...statement.reads.map((read) => sharedKeys(first, read)));
+      return shared === 0 ? 0 : shared + 1 / (1 + statement.reads.length);
+    });
     return { flag, beside: near?.id ?? null, underlaid: false };
   });
 };

@@ -119,8 +119,7 @@ export const pageKeys: readonly PageKey[] = [
 ];
 
 const takesLetters = (target: EventTarget | null) =>
-  target instanceof HTMLElement &&
-  (target.isContentEditable || target.matches('input:not([type="checkbox"]), select, textarea'));
+  target instanceof HTMLElement && (target.isContentEditable || target.matches('input, select, textarea'));
 
 /**
  * Runs what a key stands for: with Alt from anywhere, alone where nothing is being written. Ctrl+Z and Ctrl+Y undo and
@@ -129,7 +128,9 @@ const takesLetters = (target: EventTarget | null) =>
 export const pressPageKey = (event: KeyboardEvent, store: DeskStore, actions: PageActions): boolean => {
   const writing = takesLetters(event.target);
   if (event.ctrlKey || event.metaKey) {
-    const isText = writing && !(event.target instanceof HTMLInputElement && event.target.type === 'radio');
+    const isText =
+      writing &&
+      !(event.target instanceof HTMLInputElement && ['radio', 'checkbox'].includes(event.target.type));
     if (event.altKey || isText || (event.code !== 'KeyZ' && event.code !== 'KeyY')) return false;
     if (event.code === 'KeyY' || event.shiftKey) store.redo();
     else store.undo();

@@ -31,44 +31,39 @@ const differs = (node: ProseNode, statement: Statement) =>
   node.attrs.drafted !== statement.drafted ||
   JSON.stringify(node.attrs.reads) !== JSON.stringify(statement.reads);
 
-const redrawSection = (
+interface Kind<T extends { id: string }> {
+  make: (item: T) => ProseNode;
+  /** Makes a node that stands where it should say what the item says. */
+  patch: (node: ProseNode, position: number, item: T) => void;
+  /** Whether a node that nobody wants may go. */
+  mayGo: (node: ProseNode, position: number) => boolean;
+}
+
+/** Walks over the children of a node and makes them the wanted ones, in order. Positions are those before any change. */
+const align = <T extends { id: string }>(
   tr: Transaction,
-  state: EditorState,
-  section: ProseNode,
-  at: number,
-  wanted: readonly Statement[],
+  parent: ProseNode,
+  start: number,
+  wanted: readonly T[],
+  kind: Kind<T>,
 ) => {
-  const stays = (node: ProseNode, position: number) =>
-    // An empty statement that is being written in is nobody's to remove.
-    node.content.size === 0 &&
-    state.selection.from > position &&
-    state.selection.from < position + node.nodeSize;
-  const ids = new Set(wanted.map(({ id }) => id));
   let next = 0;
-  section.forEach((node, offset) => {
-    const position = at + 1 + offset;
-    const here = tr.mapping.map(position);
+  parent.forEach((node, offset) => {
+    const position = start + offset;
     const target = wanted.findIndex(({ id }, index) => index >= next && id === node.attrs.id);
-    if (target === -1) {
-      if (!(stays(node, position) && !ids.has(String(node.attrs.id)))) tr.delete(here, here + node.nodeSize);
+    const item = wanted[target];
+    if (item === undefined) {
+      const here = tr.mapping.map(position);
+      if (kind.mayGo(node, position)) tr.delete(here, here + node.nodeSize);
       return;
     }
-    const missing = wanted
-      .slice(next, target)
-      .map((statement) => state.schema.nodeFromJSON(statementNode(statement)));
-    if (missing.length > 0) tr.insert(here, missing);
-    const statement = wanted[target];
-    if (statement === undefined) return;
-    const now = tr.mapping.map(position);
-    rewrite(tr, now, node.textContent, statement.text, state.schema);
-    if (differs(node, statement)) {
-      const { id, origin, drafted, reads } = statement;
-      tr.setNodeMarkup(tr.mapping.map(position), null, { id, origin, drafted, reads });
-    }
+    const missing = wanted.slice(next, target).map(kind.make);
+    if (missing.length > 0) tr.insert(tr.mapping.map(position), missing);
+    kind.patch(node, position, item);
     next = target + 1;
   });
-  const rest = wanted.slice(next).map((statement) => state.schema.nodeFromJSON(statementNode(statement)));
-  if (rest.length > 0) tr.insert(tr.mapping.map(at + section.nodeSize - 1), rest);
+  const rest = wanted.slice(next).map(kind.make);
+  if (rest.length > 0) tr.insert(tr.mapping.map(start + parent.content.size), rest);
 };
 
 /**
@@ -76,40 +71,36 @@ const redrawSection = (
  * Statements that agree are not touched, so that caret, selection and scroll stay.
  */
 export const redraw = (state: EditorState, sheet: Sheet): Transaction | null => {
-  const tr = state.tr;
-  const wanted = new Map(sheet.sections.map((section) => [section.id, section]));
-  const held = new Set<string>();
-  state.doc.forEach((section, offset) => {
-    const target = wanted.get(String(section.attrs.id));
-    if (target === undefined) {
-      const here = tr.mapping.map(offset);
-      tr.delete(here, here + section.nodeSize);
-      return;
-    }
-    held.add(target.id);
-    redrawSection(tr, state, section, offset, standing(target));
-  });
-  if (held.size < sheet.sections.length) {
-    // A new section comes in after the one that it follows in the sheet.
-    let end = 0;
-    for (const section of sheet.sections) {
-      if (!held.has(section.id)) {
-        const { id, heading } = section;
-        const node = state.schema.node(
-          'section',
-          { id, heading },
-          standing(section).map((statement) => state.schema.nodeFromJSON(statementNode(statement))),
-        );
-        tr.insert(end, node);
-      }
-      end = 0;
-      let passed = false;
-      tr.doc.forEach((node, offset) => {
-        if (passed) return;
-        end = offset + node.nodeSize;
-        passed = node.attrs.id === section.id;
+  const { schema, selection, tr } = state;
+
+  const makeStatement = (statement: Statement) => schema.nodeFromJSON(statementNode(statement));
+
+  const patchStatement = (node: ProseNode, position: number, statement: Statement) => {
+    rewrite(tr, tr.mapping.map(position), node.textContent, statement.text, schema);
+    if (!differs(node, statement)) return;
+    const { id, origin, drafted, reads } = statement;
+    tr.setNodeMarkup(tr.mapping.map(position), null, { id, origin, drafted, reads });
+  };
+
+  // An empty statement that is being written in is nobody's to remove.
+  const isIdle = (node: ProseNode, position: number) =>
+    node.content.size > 0 || selection.from <= position || selection.from >= position + node.nodeSize;
+
+  align(tr, state.doc, 0, sheet.sections, {
+    make: (section) => {
+      const { id, heading } = section;
+      return schema.node('section', { id, heading }, standing(section).map(makeStatement));
+    },
+    patch: (node, position, section) => {
+      align(tr, node, position + 1, standing(section), {
+        make: makeStatement,
+        patch: patchStatement,
+        mayGo: isIdle,
       });
-    }
-  }
+      if (node.attrs.heading === section.heading) return;
+      tr.setNodeMarkup(tr.mapping.map(position), null, { id: section.id, heading: section.heading });
+    },
+    mayGo: () => true,
+  });
   return tr.docChanged ? tr.setMeta(redrawn, true).setMeta('addToHistory', false) : null;
 };

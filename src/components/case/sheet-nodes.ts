@@ -37,7 +37,9 @@ const statement = Node.create({
   renderHTML: ({ node }) => [
     'span',
     { class: 'statement', 'data-statement': String(node.attrs.id), 'data-origin': String(node.attrs.origin) },
-    0,
+    ['span', { class: 'words' }, 0],
+    // A gap that cannot be written in keeps the end of one statement apart from the start of the next.
+    ['span', { class: 'gap', contenteditable: 'false' }, ' '],
   ],
 });
 
@@ -140,6 +142,17 @@ const writing = Extension.create({
           return true;
         },
         handleDrop: () => true,
+        handleDOMEvents: {
+          // The browser takes the start of a statement for the end of the one before; the editor knows better.
+          beforeinput: (view, event) => {
+            const { $from, empty } = view.state.selection;
+            if (event.inputType !== 'insertText' || event.data === null || view.composing) return false;
+            if (!empty || $from.parentOffset !== 0) return false;
+            event.preventDefault();
+            view.dispatch(view.state.tr.insertText(event.data).scrollIntoView());
+            return true;
+          },
+        },
         clipboardTextSerializer: (slice) => slice.content.textBetween(0, slice.content.size, ' '),
       },
     }),

@@ -13,6 +13,10 @@ export interface Row {
   between?: readonly string[];
   /** Fields whose unit is printed by a later field of the row. */
   unitless?: readonly string[];
+  /** Room for a box, in characters, where the usual room is wrong. */
+  sizes?: Readonly<Record<string, number>>;
+  /** Shorter labels where the row says the rest. */
+  short?: Readonly<Record<string, string>>;
   /** Whether the row is of use, given the other values of the group. A row with something recorded is always shown. */
   when?: (value: (name: string) => unknown) => boolean;
 }
@@ -48,8 +52,10 @@ const course: Layout = {
 export const layouts: Readonly<Record<string, Layout>> = {
   who: {
     usual: [
-      ...one('eye', 'consentEye', 'markedEye', 'timeOutEye'),
-      { fields: ['timeOutAt'] },
+      { label: 'Eye', fields: ['eye'] },
+      { label: 'On the consent', fields: ['consentEye'] },
+      { label: 'Marked', fields: ['markedEye'] },
+      { label: 'At time-out', fields: ['timeOutEye', 'timeOutAt'], between: ['', 'at'] },
       ...one('urgency', 'performed'),
       { label: 'Operation', fields: ['startedAt', 'endedAt'], between: ['', 'to'] },
       { label: 'Surgeon', fields: ['surgeon.name', 'surgeon.role'], between: ['', 'as'] },
@@ -85,7 +91,7 @@ export const layouts: Readonly<Record<string, Layout>> = {
         unitless: ['detachmentFromClock', 'detachmentToClock'],
       },
       { label: 'PVD', fields: ['posteriorVitreousDetachment'] },
-      { label: 'PVR', fields: ['pvr.edition', 'pvr.grade', 'pvr.clockHours'], between: ['', 'grade', ''] },
+      { label: 'PVR', fields: ['pvr.edition', 'pvr.grade', 'pvr.clockHours'], between: ['', '', ''] },
       ...one('lens'),
       {
         label: 'Eye',
@@ -147,7 +153,15 @@ export const layouts: Readonly<Record<string, Layout>> = {
   buckle: { usual: one('elements', 'peritomy', 'muscleSlings', 'conjunctivalClosure') },
   'buckle.elements': {
     usual: [
-      ...one('role'),
+      {
+        fields: ['role'],
+        short: {
+          encircling: 'encircling',
+          segment: 'segment',
+          meridional: 'meridional',
+          'under-band': 'under band',
+        },
+      },
       { label: 'Element', fields: ['material', 'form'], between: ['', ''] },
       {
         label: 'Size',
@@ -173,7 +187,7 @@ export const layouts: Readonly<Record<string, Layout>> = {
       {
         label: 'Pressure then',
         fields: ['pressureWhileTensioningMmHg', 'pressureSetBy'],
-        between: ['', 'set by'],
+        between: ['', ''],
         when: is('role', 'encircling', undefined),
       },
       { label: 'Height, stay', fields: ['heightMm', 'intention'], between: ['', ''] },
@@ -190,19 +204,24 @@ export const layouts: Readonly<Record<string, Layout>> = {
       {
         fields: ['quadrant', 'kind', 'material', 'gauge', 'biteMm', 'overDetachedRetina'],
         between: ['', '', '', 'size', 'bite', 'over detached retina'],
+        sizes: { gauge: 4, biteMm: 3 },
       },
     ],
   },
   'buckle.elements.closure': {
     usual: [
-      { label: 'Joined', fields: ['kind', 'quadrant', 'material'], between: ['by', '', ''] },
-      { label: 'Cut ends match', fields: ['endsMatch'] },
+      {
+        fields: ['kind', 'quadrant', 'material', 'endsMatch'],
+        between: ['', '', '', 'cut ends match'],
+      },
     ],
   },
   'buckle.elements.frontEdgeByQuadrantMm': {
     usual: [
-      { label: 'Temporal', fields: ['superotemporal', 'inferotemporal'], between: ['superior', 'inferior'] },
-      { label: 'Nasal', fields: ['superonasal', 'inferonasal'], between: ['superior', 'inferior'] },
+      {
+        fields: ['superotemporal', 'superonasal', 'inferonasal', 'inferotemporal'],
+        between: ['superotemporal', 'superonasal', 'inferonasal', 'inferotemporal'],
+      },
     ],
   },
   vitreous: {
@@ -241,11 +260,9 @@ export const layouts: Readonly<Record<string, Layout>> = {
   },
   'vitreous.lensImplant': {
     usual: [
-      { label: 'Implant', fields: ['form', 'powerDioptres', 'position'], between: ['', '', ''] },
       {
-        label: 'Lot, expiry',
-        fields: ['lot', 'expiresOn', 'axialLengthUsedMm'],
-        between: ['', '', 'axial length'],
+        fields: ['form', 'powerDioptres', 'position', 'lot', 'expiresOn', 'axialLengthUsedMm'],
+        between: ['', '', '', 'lot', 'expiry', 'axial length'],
       },
     ],
   },
@@ -313,7 +330,7 @@ export const layouts: Readonly<Record<string, Layout>> = {
       ...one('retina'),
       { fields: ['fluidLeftWhere'], when: isNot('retina', 'flat', undefined) },
       { label: 'Breaks closed', fields: ['breaksClosed'] },
-      { label: 'Pressure', fields: ['pressureMmHg', 'pressureBy'], between: ['', 'by'] },
+      { label: 'Pressure', fields: ['pressureMmHg', 'pressureBy'], between: ['', ''] },
       ...one('discPerfused', 'complications'),
       { label: 'Blood loss', fields: ['bloodLoss'] },
       { label: 'Measured', fields: ['bloodLossMl'], when: is('bloodLoss', 'measured') },

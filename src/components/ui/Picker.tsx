@@ -8,10 +8,12 @@ interface Props {
   onChange: (value: string | undefined) => void;
   describedBy?: string | undefined;
   readOnly?: boolean;
+  /** The line that stands for nothing recorded. */
+  empty: string;
 }
 
 /** One of many values. The empty line at the top makes the field absent again. */
-export const Picker = memo(({ id, label, options, value, onChange, describedBy, readOnly }: Props) => (
+export const Picker = memo(({ id, label, options, value, onChange, describedBy, readOnly, empty }: Props) => (
   <select
     id={id}
     className="case-box case-picker"
@@ -21,7 +23,7 @@ export const Picker = memo(({ id, label, options, value, onChange, describedBy, 
     disabled={readOnly}
     onChange={(event) => onChange(event.target.value === '' ? undefined : event.target.value)}
   >
-    <option value="">not recorded</option>
+    <option value="">{empty}</option>
     {Object.entries(options).map(([key, text]) => (
       <option key={key} value={key}>
         {text}

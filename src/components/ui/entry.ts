@@ -43,7 +43,7 @@ export const readClock = (typed: string): Reading<number> => {
   const parts = /^(\d{1,2}):([0-5]\d)$/.exec(text);
   const value = parts === null ? Number(text.replace(',', '.')) : Number(parts[1]) + Number(parts[2]) / 60;
   if (!Number.isFinite(value)) return unreadable('Write a clock hour: 2, or 4:30.');
-  const hour = value < 1 ? value + 12 : value;
+  const hour = value >= 0 && value < 1 ? value + 12 : value;
   if (hour < 1 || hour >= 13) return unreadable('Write a clock hour from 1 to 12:45.');
   if (!Number.isInteger(hour * 4)) return unreadable('Write whole, half or quarter hours: 4:30.');
   return ok(hour);
@@ -93,7 +93,7 @@ export const readDateTime = (typed: string, now: string, day: string): Reading<s
   const text = typed.trim().toLowerCase();
   if (text === '') return ok(undefined);
   if (text === 'now') return ok(now);
-  const parts = /^(.*?)[\s,t]*\b([01]?\d|2[0-3]):?([0-5]\d)$/.exec(text);
+  const parts = /^(?:(.+?)(?:[\s,]+|t))?([01]?\d|2[0-3]):?([0-5]\d)$/.exec(text);
   if (parts === null) return unreadable('Write a day and a time, or the time alone: 10:42, or “now”.');
   const [, before = '', hour = '', minute = ''] = parts;
   const date = before === '' ? ok(day) : readDate(before, now);
