@@ -3,7 +3,7 @@ import { pageKeys } from './page-keys.ts';
 
 const inFields: readonly (readonly [string, string])[] = [
   ['Enter', 'on to the next field'],
-  ['← →, or the first letter', 'choose in a row of buttons'],
+  ['← →, a … z', 'choose in a row of buttons, by arrow or first letter'],
   ['Delete', 'make a row of buttons empty again'],
   ['Esc', 'leave the field, so that single keys work'],
   ['Ctrl+Z, Ctrl+Y', 'undo, redo'],

@@ -49,7 +49,9 @@ export const PatientBar = ({ revision, save, today, signed }: Props) => {
       <h1>{name === '' ? 'No name yet' : name}</h1>
       <strong className="eye">{who?.eye === undefined ? 'Eye not recorded' : `${who.eye} eye`}</strong>
       <span>{facts.join(' · ')}</span>
-      <span className="patient-operation">{operationInWords(who)}</span>
+      <span className="patient-operation" title={operationInWords(who)}>
+        {operationInWords(who)}
+      </span>
       <span className="patient-save" data-save={save.kind}>
         {signed ? 'Signed' : `Draft, revision ${revision} · ${saveInWords(save)}`}
       </span>

@@ -53,6 +53,8 @@ export interface DeskState {
   readonly future: readonly CaseRecord[];
 }
 
+type Derived = Pick<DeskState, 'record' | 'sheet' | 'answers' | 'flags' | 'figures' | 'levels' | 'described'>;
+
 export type DeskStore = ReturnType<typeof createDeskStore>;
 
 const noPaths: readonly FieldPath[] = [];
@@ -82,23 +84,30 @@ const descriptions = (flags: readonly Flag[]) => {
   return found;
 };
 
+/** The value before when the new one says the same, so that nothing is drawn again for it. */
+const steady = <T>(before: T | undefined, now: T): T =>
+  before !== undefined && JSON.stringify(before) === JSON.stringify(now) ? before : now;
+
 /** The state of one case page. Everything that is worked out is worked out here, once a change. */
 export const createDeskStore = (start: Content & { stage: Stage }, derive: Derivers) => {
   const listeners = new Set<() => void>();
   /** Path of the last change, so that typing a word is one step of undo. */
   let lastPath: FieldPath | null = null;
 
-  const derived = (record: CaseRecord, sheet: Sheet | null, answers: readonly Answer[]) => {
-    const flags = derive.check(record);
-    return {
+  let last: Derived | undefined;
+
+  const derived = (record: CaseRecord, sheet: Sheet | null, answers: readonly Answer[]): Derived => {
+    const flags = steady(last?.flags, derive.check(record));
+    last = {
       record,
       answers,
       flags,
-      figures: derive.figures(record),
+      figures: steady(last?.figures, derive.figures(record)),
       levels: worstLevels(flags, answers),
-      described: descriptions(flags),
-      sheet: derive.merge(sheet, derive.draft(record)),
+      described: flags === last?.flags ? last.described : descriptions(flags),
+      sheet: steady(sheet ?? undefined, derive.merge(sheet, derive.draft(record))),
     };
+    return last;
   };
 
   let state: DeskState = {
@@ -165,6 +174,13 @@ export const createDeskStore = (start: Content & { stage: Stage }, derive: Deriv
 
     /** Records a value; `undefined` makes the field absent. */
     record: (path: FieldPath, value: unknown) => changeRecord(withValue(state.record, path, value), path),
+
+    /** Records several values as one step of undo; `step` joins it with others of the same name. */
+    recordAll: (values: readonly (readonly [FieldPath, unknown])[], step: string) =>
+      changeRecord(
+        values.reduce((record, [path, value]) => withValue(record, path, value), state.record),
+        step,
+      ),
 
     addItem: (listPath: FieldPath, at: number, item: unknown = {}) =>
       changeRecord(withValue(state.record, `${listPath}.${at}`, item), null, {

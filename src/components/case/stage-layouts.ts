@@ -158,7 +158,7 @@ export const layouts: Readonly<Record<string, Layout>> = {
         short: {
           encircling: 'encircling',
           segment: 'segment',
-          meridional: 'meridional',
+          meridional: 'radial',
           'under-band': 'under band',
         },
       },

@@ -28,7 +28,11 @@ export const useAutosave = (store: DeskStore, view: CaseView, enabled: boolean) 
       return { saved: await putCase(view.id, revision.current, body), edits };
     },
     networkMode: 'always',
-    retry: (_, error) => isPassing(error),
+    retry: (_, error) => {
+      if (!isPassing(error)) return false;
+      setState({ kind: 'failed', message: error.message, retrying: true });
+      return true;
+    },
     retryDelay: (attempt) => Math.min(1000 * 2 ** attempt, longestWait),
     onError: (error) => {
       const answer = error instanceof Refusal ? error.answer : null;

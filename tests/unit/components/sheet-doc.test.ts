@@ -106,7 +106,7 @@ const anyStatement = (id: string) =>
     origin: fc.constantFrom('drafted' as const, 'edited' as const, 'parted' as const, 'deleted' as const),
     text: fc.string({ minLength: 1, maxLength: 12 }),
     drafted: fc.string({ maxLength: 12 }),
-    reads: fc.constant(['who.eye']),
+    reads: fc.constant<string[]>(['who.eye']),
   });
 
 const anySheet = fc

@@ -1,0 +1,94 @@
+/** A place on the unrolled globe: clock hour as the surgeon sees it, and millimetres behind the limbus. */
+export interface GlobePoint {
+  clock: number;
+  mm: number;
+}
+
+export interface GlobeMuscle {
+  name: string;
+  clock: number;
+  /** Half of its breadth at the insertion, in clock hours. */
+  halfClockHours: number;
+  insertionMm: number;
+}
+
+export interface GlobeElement {
+  path: string;
+  title: string;
+  /** Front edge and back edge, clockwise. A whole ring starts and ends at 6. */
+  front: readonly GlobePoint[];
+  back: readonly GlobePoint[];
+  fixations: readonly GlobePoint[];
+}
+
+export interface GlobeBreak {
+  path: string;
+  number: number;
+  title: string;
+  kind: string;
+  clock: number;
+  halfClockHours: number;
+  frontMm: number;
+  backMm: number;
+  /** How far it lies from being on an element, in words; `null` when it is held, or when nothing can be told. */
+  shortfall: string | null;
+}
+
+/** What the unrolled globe shows of one record. */
+export interface GlobeModel {
+  insertions: readonly GlobePoint[];
+  ora: readonly GlobePoint[];
+  equatorMm: number;
+  vortexMm: readonly [number, number];
+  muscles: readonly GlobeMuscle[];
+  /** The detached arc, clockwise, or the whole round. */
+  detached: { from: number; to: number } | null;
+  elements: readonly GlobeElement[];
+  breaks: readonly GlobeBreak[];
+  /** Said to screen readers and where the picture cannot be seen. */
+  summary: string;
+}
+
+export const globeWidth = 400;
+export const deepest = 22;
+const perMm = 8;
+
+/** The picture with its scales: left and top edge, breadth and height, in units of the picture. */
+export const globeLeft = -24;
+export const globeTop = -16;
+export const globeSpan = globeWidth + 32;
+export const globeHeight = deepest * perMm + 12;
+
+/** Least size at which a break can be seen. */
+const least = 4.5;
+
+/** Distance from the left edge, where 6 o'clock is; 12 lies in the middle, and 6 again at the right. */
+export const xOf = (clock: number): number => ((((clock - 6) % 12) + 12) % 12) * (globeWidth / 12);
+
+export const yOf = (mm: number): number => mm * perMm;
+
+/** Clock hour and millimetres at a point of the picture, on half hours and half millimetres. */
+export const snapped = (x: number, y: number): GlobePoint => {
+  const hours = Math.round((x / (globeWidth / 12)) * 2) / 2;
+  const clock = ((hours + 6 - 1) % 12) + 1;
+  return { clock: clock < 1 ? clock + 12 : clock, mm: Math.max(0, Math.round((y / perMm) * 2) / 2) };
+};
+
+/** A line through points clockwise, broken where it leaves the picture at 6 and comes in again at the other side. */
+export const lineThrough = (points: readonly GlobePoint[]): string => {
+  let path = '';
+  let last = Number.NEGATIVE_INFINITY;
+  points.forEach(({ clock, mm }, index) => {
+    const x = index > 0 && clock === 6 && last > globeWidth / 2 ? globeWidth : xOf(clock);
+    const starts = index === 0 || x < last - globeWidth / 2;
+    path += `${starts ? 'M' : 'L'}${x.toFixed(1)} ${yOf(mm).toFixed(1)}`;
+    last = x;
+  });
+  return path;
+};
+
+/** Half breadth and half height of a break in the picture: its own size, or the least that can be seen. */
+export const breakSize = ({ halfClockHours, frontMm, backMm }: GlobeBreak): { rx: number; ry: number } => ({
+  rx: Math.max(least, (halfClockHours * globeWidth) / 12),
+  ry: Math.max(least, (yOf(backMm) - yOf(frontMm)) / 2),
+});
