@@ -1,0 +1,29 @@
+import type { UnitView } from '../api.ts';
+import type { Answer, Flag } from '../checks/flag.ts';
+import type { Sheet } from '../drafting/sheet.ts';
+import type { CaseRecord } from '../record/schema.ts';
+
+export const FROZEN_FORMAT = 'buckram-signed-note-1';
+
+/** Everything that a signature covers. Its canonical JSON is what is hashed and kept. */
+export interface FrozenNote {
+  format: typeof FROZEN_FORMAT;
+  caseId: string;
+  version: number;
+  record: CaseRecord;
+  sheet: Sheet;
+  flags: Flag[];
+  answers: Answer[];
+  unit: UnitView;
+  versions: { record: number; templates: string; rules: string };
+  signature: {
+    /** Printed name, title and meaning, as in every readable form. */
+    name: string;
+    title: string;
+    meaning: string;
+    /** Instant, ISO 8601 in UTC. */
+    at: string;
+    /** IANA zone in which it is printed. */
+    zone: string;
+  };
+}

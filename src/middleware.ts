@@ -1,0 +1,37 @@
+import { defineMiddleware } from 'astro:middleware';
+import { readVisit } from './server/accounts/visit.ts';
+import { log } from './server/http/log.ts';
+
+/** Pages that are there before anybody has signed in. */
+const open = new Set(['/sign-in', '/404', '/403', '/500']);
+
+/** Styles that islands write on their elements need the attribute allowed; styles in files stay hashed. */
+const allowStyleAttributes = (html: string) =>
+  html.replace(
+    /(<meta http-equiv="content-security-policy" content="[^"]*)"/,
+    `$1 style-src-attr 'unsafe-inline';"`,
+  );
+
+export const onRequest = defineMiddleware(async (context, next) => {
+  if (context.isPrerendered) return next();
+  const begun = performance.now();
+  const visit = await readVisit(context.cookies);
+  if (visit !== undefined) context.locals.visit = visit;
+  const isApi = context.url.pathname.startsWith('/api/');
+  const response =
+    visit === undefined && !isApi && !open.has(context.url.pathname)
+      ? context.redirect(`/sign-in?next=${encodeURIComponent(context.url.pathname)}`)
+      : await next();
+  log().info(
+    {
+      method: context.request.method,
+      route: context.routePattern,
+      status: response.status,
+      ms: Math.round(performance.now() - begun),
+    },
+    'answered',
+  );
+  if (response.status === 403 && !isApi && response.body === null) return context.rewrite('/403');
+  if (!(response.headers.get('content-type') ?? '').startsWith('text/html')) return response;
+  return new Response(allowStyleAttributes(await response.text()), response);
+});
