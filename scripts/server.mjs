@@ -19,7 +19,13 @@ process.env.NODE_ENV ??= 'production';
 quietErrors();
 const entry = new URL('../dist/server/entry.mjs', import.meta.url).href;
 /** @type {{ handler: (request: import('node:http').IncomingMessage, answer: import('node:http').ServerResponse) => unknown }} */
-const { handler } = await import(entry);
+const { handler } = await import(entry).catch((error) => {
+  if (error.code === 'ERR_MODULE_NOT_FOUND' && error.url === entry) {
+    console.error('The application is not built; npm start builds it, or npm run build.');
+    return process.exit(1);
+  }
+  throw error;
+});
 quietErrors();
 
 const addresses = addressesOf(config.publicAddress, config.port);
@@ -98,13 +104,21 @@ server.on('clientError', (_error, socket) => {
     socket.end('HTTP/1.1 400 Bad Request\r\nConnection: close\r\nContent-Length: 0\r\n\r\n');
 });
 
+/** Ends what the application does beside answering (src/server/at-stop.ts). */
+const endBackgroundWork = async () => {
+  /** @type {Set<() => Promise<void>>} */
+  const ends = Reflect.get(globalThis, Symbol.for('buckram.at-stop')) ?? new Set();
+  const results = await Promise.allSettled([...ends].map((end) => end()));
+  for (const result of results) if (result.status === 'rejected') saySafely(result.reason);
+};
+
 const stop = () => {
   if (stopping) return;
   stopping = true;
-  const end = () => process.exit(0);
-  server.close(end);
+  setTimeout(() => process.exit(0), patience);
+  const closed = new Promise((resolve) => server.close(resolve));
   server.closeIdleConnections();
-  setTimeout(end, patience);
+  Promise.all([closed, endBackgroundWork()]).then(() => process.exit(0));
 };
 process.on('SIGTERM', stop);
 process.on('SIGINT', stop);

@@ -12,7 +12,11 @@ export const astro = ['node_modules/astro/astro.js'];
  * The environment that Astro's commands run in: they send nothing about this machine anywhere.
  * @returns {NodeJS.ProcessEnv}
  */
-export const astroEnvironment = () => ({ ...process.env, ASTRO_TELEMETRY_DISABLED: '1' });
+export const astroEnvironment = () => ({
+  ...process.env,
+  ASTRO_TELEMETRY_DISABLED: '1',
+  ASTRO_DISABLE_UPDATE_CHECK: 'true',
+});
 
 export const isBuilt = () =>
   existsSync(join(projectFolder, 'dist/server/entry.mjs')) && readStamp(stampFile) === hashOf(sources);
