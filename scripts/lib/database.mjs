@@ -37,18 +37,8 @@ export const withClient = async (connectionString, work) => {
 };
 
 /**
- * @param {string} connectionString
- * @param {string} database
- */
-const inDatabase = (connectionString, database) => {
-  const url = new URL(connectionString);
-  url.pathname = `/${database}`;
-  return url.href;
-};
-
-/**
  * Who may enter a database, and what a copy of a template does not take along: the application connects and makes the schema
- * of its job queue; everything in "public" belongs to the owner.
+ * of its job queue. Everything in "public" belongs to the owner, and the migrations grant each table what the application needs of it.
  * @param {pg.Client} client
  * @param {string} database
  */
@@ -65,7 +55,7 @@ const grantEntry = async (client, database) => {
  * @param {string} database
  */
 export const ensureDatabase = async (adminUrl, passwords, database) => {
-  const isNew = await withClient(adminUrl, async (client) => {
+  await withClient(adminUrl, async (client) => {
     for (const [role, password] of [
       [owner, passwords.owner],
       [app, passwords.app],
@@ -76,16 +66,10 @@ export const ensureDatabase = async (adminUrl, passwords, database) => {
       }
     }
     const found = await client.query('select 1 from pg_database where datname = $1', [database]);
-    if (found.rowCount !== 0) return false;
-    await client.query(`create database ${pg.escapeIdentifier(database)} owner ${owner}`);
+    if (found.rowCount === 0) {
+      await client.query(`create database ${pg.escapeIdentifier(database)} owner ${owner}`);
+    }
     await grantEntry(client, database);
-    return true;
-  });
-  if (!isNew) return;
-  await withClient(inDatabase(adminUrl, database), async (client) => {
-    const rights = `alter default privileges for role ${owner} in schema public grant`;
-    await client.query(`${rights} select, insert, update, delete on tables to ${app}`);
-    await client.query(`${rights} usage, select on sequences to ${app}`);
   });
 };
 

@@ -1,4 +1,5 @@
 import pg from 'pg';
+import PgBoss from 'pg-boss';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { createTestDatabase, type TestDatabase } from '../support/database.ts';
 
@@ -41,9 +42,19 @@ describe("the application's role", () => {
     await expect(client.query('set role buckram_owner')).rejects.toMatchObject(refused);
   });
 
-  it('may make a schema of its own, for the job queue', async () => {
-    await client.query('create schema queue');
-    await client.query('drop schema queue');
+  it('may set up the schema of the job queue, its own', async () => {
+    const boss = new PgBoss({ connectionString: database.url, max: 2 });
+    await boss.start();
+    await boss.createQueue('letters');
+    await boss.stop({ graceful: false });
+  });
+
+  it('has no right on a table that no migration has given it', async () => {
+    const owner = new pg.Client({ connectionString: database.ownerUrl });
+    await owner.connect();
+    await owner.query('create table unforeseen (id int)');
+    await owner.end();
+    await expect(client.query('select * from unforeseen')).rejects.toMatchObject(refused);
   });
 });
 
