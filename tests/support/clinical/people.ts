@@ -62,4 +62,4 @@ export const staff = (random: Random, count: number): string[] =>
   random
     .shuffled(families)
     .slice(0, count)
-    .map((name) => `${random.pick(['Dr', 'Ms', 'Mr'])} ${random.pick(given)} ${name}`);
+    .map((name) => `${random.pick(['Dr', 'Dr', 'Professor'])} ${random.pick(given)} ${name}`);

@@ -122,7 +122,7 @@ export const whoStage = (plan: Plan, clock: Clock, symptomsSince: string): Who =
     theatre: `Theatre ${random.whole(1, 6)}`,
     ...seniority(plan, names),
     anaesthetist: plan.general || random.chance(0.6) ? (names[3] ?? 'none') : 'none',
-    scrubNurse: names[4] ?? 'Ms D',
+    scrubNurse: (names[4] ?? 'Dr D').replace(/^\S+/, 'Nurse'),
     referrer: {
       kind,
       ...(needsName(kind)
