@@ -3,7 +3,7 @@ import { useCallback, useEffect, useMemo, useRef, useState } from 'react';
 import type { CaseSigned, CaseView, UnitView } from '../../domain/api.ts';
 import { BottomBar, blockedBy } from './BottomBar.tsx';
 import { ConflictBar } from './ConflictBar.tsx';
-import { deriversFor } from './derive.ts';
+import { derivers } from './derive.ts';
 import { createDeskStore, type Pane, panes } from './desk-store.ts';
 import { KeysDialog } from './KeysDialog.tsx';
 import { Margin } from './Margin.tsx';
@@ -118,10 +118,10 @@ const CaseDesk = ({ view, unit, today, signed, onSigned }: DeskProps) => {
 
 /** The case page: record, sheet and margin side by side, drafted and checked at every key. */
 export const CasePage = (props: Props) => {
-  const { view, unit, mayWrite } = props;
+  const { view, mayWrite } = props;
   const [signed, setSigned] = useState(props.signed);
   const [client] = useState(() => new QueryClient());
-  const [store] = useState(() => createDeskStore({ ...view, stage: 'who' }, deriversFor(unit)));
+  const [store] = useState(() => createDeskStore({ ...view, stage: 'who' }, derivers));
   const readOnly = !mayWrite || view.state === 'signed' || signed !== null;
   const tools: Desk = useMemo(() => ({ store, readOnly, now: localNow }), [store, readOnly]);
   return (

@@ -52,7 +52,7 @@ export const PatientBar = ({ revision, save, today, signed }: Props) => {
       <span className="patient-operation" title={operationInWords(who)}>
         {operationInWords(who)}
       </span>
-      <span className="patient-save" data-save={save.kind}>
+      <span className="patient-save" data-save={save.kind} suppressHydrationWarning>
         {signed ? 'Signed' : `Draft, revision ${revision} · ${saveInWords(save)}`}
       </span>
     </header>

@@ -4,6 +4,7 @@ import { showClock } from '../ui/entry.ts';
 import { GlobeHandle } from './GlobeHandle.tsx';
 import { globeFrom } from './globe-from-record.ts';
 import {
+  areaBetween,
   type GlobeBreak as Break,
   breakSize,
   deepest,
@@ -42,11 +43,9 @@ const Scales = () => (
   </g>
 );
 
-/** A strip of the clock, in two pieces where it goes round 6. */
-const strips = (from: number, to: number, whole: boolean) => {
-  if (whole) return [{ x: 0, width: globeWidth }];
-  const start = xOf(from);
-  const end = xOf(to);
+/** Left and breadth of a muscle, in two pieces where it lies across 6. */
+const strips = (from: number, to: number) => {
+  const [start, end] = [xOf(from), xOf(to)];
   if (end >= start) return [{ x: start, width: end - start }];
   return [
     { x: start, width: globeWidth - start },
@@ -57,7 +56,7 @@ const strips = (from: number, to: number, whole: boolean) => {
 const Anatomy = ({ model }: { model: GlobeModel }) => (
   <g>
     {model.muscles.flatMap((muscle) =>
-      strips(muscle.clock - muscle.halfClockHours, muscle.clock + muscle.halfClockHours, false).map(
+      strips(muscle.clock - muscle.halfClockHours, muscle.clock + muscle.halfClockHours).map(
         ({ x, width }) => (
           <rect
             key={`${muscle.name} ${x}`}
@@ -85,48 +84,24 @@ const Anatomy = ({ model }: { model: GlobeModel }) => (
     <text className="globe-label" x={globeWidth} y={yOf(model.equatorMm) - 3} textAnchor="end">
       equator
     </text>
-    <path className="globe-ora" d={lineThrough(model.ora)} />
+    <path className="globe-ora" d={lineThrough(model.ora.from)} />
+    <path className="globe-ora" d={lineThrough(model.ora.to)} />
     <path className="globe-insertions" d={lineThrough(model.insertions)} />
   </g>
 );
 
-const Detachment = ({ detached }: { detached: NonNullable<GlobeModel['detached']> }) => (
+const ElementShape = ({ element }: { element: GlobeElement }) => (
   <g>
-    {strips(detached.from, detached.to, detached.from === detached.to).map(({ x, width }) => (
-      <rect
-        key={x}
-        className="globe-detached"
-        x={x}
-        y={yOf(8)}
-        width={width}
-        height={yOf(deepest - 2) - yOf(8)}
+    <path className="globe-element" d={areaBetween(element)} />
+    {element.fixations.map(({ clock, mm }) => (
+      <path
+        key={clock}
+        className="globe-fixation"
+        d={`M${xOf(clock) - 3} ${yOf(mm) - 14}l6 28m0 -28l-6 28`}
       />
     ))}
   </g>
 );
-
-const pieces = (path: string) => path.split('M').filter((piece) => piece !== '');
-
-const ElementShape = ({ element }: { element: GlobeElement }) => {
-  const fronts = pieces(lineThrough(element.front));
-  const backs = pieces(lineThrough(element.back));
-  const fills = fronts.map((front, index) => {
-    const back = (backs[index] ?? '').split('L').reverse().join('L');
-    return `M${front}L${back}Z`;
-  });
-  return (
-    <g>
-      <path className="globe-element" d={fills.join('')} />
-      {element.fixations.map(({ clock, mm }) => (
-        <path
-          key={clock}
-          className="globe-fixation"
-          d={`M${xOf(clock) - 3} ${yOf(mm) - 16}l6 32m0 -32l-6 32`}
-        />
-      ))}
-    </g>
-  );
-};
 
 const anchorOf = (x: number) => (x > globeWidth * 0.7 ? 'end' : x < globeWidth * 0.3 ? 'start' : 'middle');
 
@@ -136,7 +111,7 @@ const BreakShape = ({ found }: { found: Break }) => {
   const x = xOf(found.clock);
   const y = yOf((found.frontMm + found.backMm) / 2);
   return (
-    <g data-unheld={found.shortfall !== null || undefined}>
+    <g data-unheld={found.shortfall !== null || undefined} data-unsure={!found.sure || undefined}>
       {found.shortfall !== null && <circle className="globe-unheld" cx={x} cy={y} r={Math.max(rx, ry) + 4} />}
       {found.kind === 'horseshoe' ? (
         <path
@@ -206,6 +181,9 @@ export const UnrolledGlobe = () => {
   );
   const openBreak = useCallback((found: Break) => goToField(store, `${found.path}.clock`), [store]);
 
+  if (model === null) {
+    return <p className="globe globe-absent">The globe is drawn here once the eye is recorded.</p>;
+  }
   return (
     <figure className="globe">
       <svg
@@ -214,7 +192,7 @@ export const UnrolledGlobe = () => {
         aria-label={model.summary}
       >
         <Scales />
-        {model.detached !== null && <Detachment detached={model.detached} />}
+        {model.detached !== null && <path className="globe-detached" d={areaBetween(model.detached)} />}
         <Anatomy model={model} />
         {model.elements.map((element) => (
           <ElementShape key={element.path} element={element} />

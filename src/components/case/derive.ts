@@ -1,4 +1,3 @@
-import type { UnitView } from '../../domain/api.ts';
 import { checkRecord } from '../../domain/checks/engine.ts';
 import { draftNote } from '../../domain/drafting/draft.ts';
 import { mergeSheet } from '../../domain/drafting/merge.ts';
@@ -6,9 +5,9 @@ import { numbersOf } from '../../domain/physics/numbers.ts';
 import type { Derivers } from './desk-store.ts';
 
 /** The domain's own answers, in the browser. The server asks the same again on save and at signature. */
-export const deriversFor = (unit: UnitView): Derivers => ({
+export const derivers: Derivers = {
   check: checkRecord,
-  draft: (record) => draftNote(record, { unit }),
+  draft: draftNote,
   merge: mergeSheet,
   figures: numbersOf,
-});
+};

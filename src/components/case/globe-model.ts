@@ -12,12 +12,14 @@ export interface GlobeMuscle {
   insertionMm: number;
 }
 
-export interface GlobeElement {
-  path: string;
-  title: string;
-  /** Front edge and back edge, clockwise. A whole ring starts and ends at 6. */
+/** A part of the wall between two lines that run clockwise over the same hours. A whole ring starts and ends at 6. */
+export interface GlobeArea {
   front: readonly GlobePoint[];
   back: readonly GlobePoint[];
+}
+
+export interface GlobeElement extends GlobeArea {
+  path: string;
   fixations: readonly GlobePoint[];
 }
 
@@ -30,6 +32,8 @@ export interface GlobeBreak {
   halfClockHours: number;
   frontMm: number;
   backMm: number;
+  /** Its depth was measured, not taken from a zone or unknown. */
+  sure: boolean;
   /** How far it lies from being on an element, in words; `null` when it is held, or when nothing can be told. */
   shortfall: string | null;
 }
@@ -37,12 +41,11 @@ export interface GlobeBreak {
 /** What the unrolled globe shows of one record. */
 export interface GlobeModel {
   insertions: readonly GlobePoint[];
-  ora: readonly GlobePoint[];
+  /** Where the ora may lie. */
+  ora: { from: readonly GlobePoint[]; to: readonly GlobePoint[] };
   equatorMm: number;
-  vortexMm: readonly [number, number];
   muscles: readonly GlobeMuscle[];
-  /** The detached arc, clockwise, or the whole round. */
-  detached: { from: number; to: number } | null;
+  detached: GlobeArea | null;
   elements: readonly GlobeElement[];
   breaks: readonly GlobeBreak[];
   /** Said to screen readers and where the picture cannot be seen. */
@@ -74,17 +77,33 @@ export const snapped = (x: number, y: number): GlobePoint => {
   return { clock: clock < 1 ? clock + 12 : clock, mm: Math.max(0, Math.round((y / perMm) * 2) / 2) };
 };
 
-/** A line through points clockwise, broken where it leaves the picture at 6 and comes in again at the other side. */
-export const lineThrough = (points: readonly GlobePoint[]): string => {
-  let path = '';
-  let last = Number.NEGATIVE_INFINITY;
+/** Corners of a line through points clockwise, in pieces where it goes round 6. */
+const linePieces = (points: readonly GlobePoint[]): string[][] => {
+  const pieces: string[][] = [[]];
+  const add = (x: number, mm: number) => pieces.at(-1)?.push(`${x.toFixed(1)} ${yOf(mm).toFixed(1)}`);
   points.forEach(({ clock, mm }, index) => {
-    const x = index > 0 && clock === 6 && last > globeWidth / 2 ? globeWidth : xOf(clock);
-    const starts = index === 0 || x < last - globeWidth / 2;
-    path += `${starts ? 'M' : 'L'}${x.toFixed(1)} ${yOf(mm).toFixed(1)}`;
-    last = x;
+    if (clock !== 6 || index === 0) {
+      add(xOf(clock), mm);
+      return;
+    }
+    add(globeWidth, mm);
+    if (index === points.length - 1) return;
+    pieces.push([]);
+    add(0, mm);
   });
-  return path;
+  return pieces;
+};
+
+export const lineThrough = (points: readonly GlobePoint[]): string =>
+  linePieces(points)
+    .map((piece) => `M${piece.join('L')}`)
+    .join('');
+
+export const areaBetween = ({ front, back }: GlobeArea): string => {
+  const backs = linePieces(back);
+  return linePieces(front)
+    .map((piece, index) => `M${[...piece, ...(backs[index] ?? []).reverse()].join('L')}Z`)
+    .join('');
 };
 
 /** Half breadth and half height of a break in the picture: its own size, or the least that can be seen. */
