@@ -117,6 +117,13 @@ const moreClocks = (where: Where, first: number): number[] => {
   return clocks.slice(1);
 };
 
+/** One segment holds neighbouring breaks only when they lie equally far back. */
+const beside = (found: PlannedBreak, leading: PlannedBreak): PlannedBreak => {
+  const { front = 10, back = 11 } = leading;
+  const length = Math.min((found.back ?? 11) - (found.front ?? 10), back - front);
+  return { ...found, front, back: front + length };
+};
+
 export const planBreaks = (where: Where, clock: number): PlannedBreak[] => {
   const { random, scenario, eye, detachment } = where;
   switch (scenario.disease) {
@@ -155,11 +162,14 @@ export const planBreaks = (where: Where, clock: number): PlannedBreak[] => {
       const at = wrap(random.stepped(4.5, 7.5, 0.25));
       return [{ kind: 'round-hole', clock: at, extent: 0.1, front, back: front + 0.5, detached: true }];
     }
-    default:
+    default: {
+      const leading = ordinary(where, clock, true);
+      const others = moreClocks(where, clock).map((at) => ordinary(where, at, false));
       return [
-        ordinary(where, clock, true),
-        ...moreClocks(where, clock).map((at) => ordinary(where, at, false)),
+        leading,
+        ...(scenario.buckle === 'segment' ? others.map((found) => beside(found, leading)) : others),
       ];
+    }
   }
 };
 

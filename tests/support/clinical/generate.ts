@@ -27,7 +27,7 @@ const assemble = (plan: Plan): CaseRecord => {
   const clock = timesOf(plan);
   const who = whoStage(plan, clock, symptomsSince);
   const before = beforeStage(plan, symptomsSince);
-  const anaesthesia = anaesthesiaStage(plan, who);
+  const anaesthesia = anaesthesiaStage(plan, who, before.anticoagulants !== 'none');
   const elements = plannedElements(plan);
   const vitreous = vitreousStage(plan);
   const drainage = drainageStage(plan, vitreous);

@@ -26,7 +26,7 @@ export const muscleClock = (eye: Eye): Record<Muscle, number> =>
     : { superior: 12, medial: 9, inferior: 6, lateral: 3 };
 
 const behindLimbus: Record<Muscle, number> = { medial: 5.5, inferior: 6.5, lateral: 6.9, superior: 7.7 };
-const oraByMeridian: Record<Muscle, number> = { medial: 6.3, inferior: 7, lateral: 7.8, superior: 7 };
+const oraByMeridian: Record<Muscle, number> = { medial: 6.3, inferior: 7, lateral: 7.8, superior: 7.7 };
 
 const roundTheClock = (values: Record<Muscle, number>, clock: number, eye: Eye): number => {
   const at = muscleClock(eye);

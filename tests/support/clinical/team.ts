@@ -133,7 +133,11 @@ export const whoStage = (plan: Plan, clock: Clock, symptomsSince: string): Who =
   };
 };
 
-export const anaesthesiaStage = (plan: Plan, who: Who): NonNullable<CaseRecord['anaesthesia']> => {
+export const anaesthesiaStage = (
+  plan: Plan,
+  who: Who,
+  thinned: boolean,
+): NonNullable<CaseRecord['anaesthesia']> => {
   const { random, eye } = plan;
   const antisepsis = allergicTo(who, 'iodine') ? 'chlorhexidine' : 'povidone-iodine';
   const stopped = { nitrousOxideUsed: false, nitrousOxideStoppedAt: 'not-applicable', antisepsis } as const;
@@ -167,11 +171,12 @@ export const anaesthesiaStage = (plan: Plan, who: Who): NonNullable<CaseRecord['
       ...stopped,
     };
   }
+  // A sharp needle is avoided round a long eye and in thinned blood.
+  const sharp = plan.axialLengthMm <= 26 && !thinned;
   const kind = random.weighted<'sub-tenon' | 'peribulbar' | 'retrobulbar'>([
     [7, 'sub-tenon'],
-    // A sharp needle is avoided round a long eye.
-    [plan.axialLengthMm > 26 ? 0 : 3, 'peribulbar'],
-    [plan.axialLengthMm > 26 ? 0 : 0.5, 'retrobulbar'],
+    [sharp ? 3 : 0, 'peribulbar'],
+    [sharp ? 0.5 : 0, 'retrobulbar'],
   ]);
   return { kind, sedation, blockEye: eye, agents: block, ...stopped };
 };

@@ -142,7 +142,7 @@ export const tamponadeFaults = [
     hasOil(r) ? procedures(r, (names) => names.map((n) => (n === 'oil' ? 'gas' : n))) : null,
   ),
   wrong(['gas-and-oil-listed', 'contradiction', 'Gas and oil are both among the procedures'], (r) =>
-    hasOil(r) ? procedures(r, (names) => [...names, 'gas']) : null,
+    hasOil(r) && r.who?.whyChanged === undefined ? procedures(r, (names) => [...names, 'gas']) : null,
   ),
   missing(['agent-left-blank', 'omission', 'What fills the eye is left blank'], 'tamponade.agent'),
   missing(

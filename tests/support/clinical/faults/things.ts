@@ -215,12 +215,10 @@ export const medicineFaults = [
   medicines.inItem(
     ['one-drop-twice', 'caution', 'The same drop is prescribed twice'],
     'aftercare.drops',
-    (d, r, _, index) =>
-      index === 1
-        ? { drug: listAt(r, 'aftercare.drops')[0]?.drug, strength: listAt(r, 'aftercare.drops')[0]?.strength }
-        : d === undefined
-          ? {}
-          : null,
+    (_drop, r, _random, index) => {
+      const [first] = listAt(r, 'aftercare.drops');
+      return index === 1 ? { drug: first?.drug, strength: first?.strength } : null;
+    },
   ),
 ];
 
