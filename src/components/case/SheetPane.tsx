@@ -39,6 +39,39 @@ const StillSheet = () => {
   return <SheetPaper sheet={sheet} marks={statementMarks(store.get())} />;
 };
 
+const numbered = (rows: readonly string[][]) => rows.map((cells, index) => ({ cells, number: index + 1 }));
+
+const Tables = () => {
+  const tables = useDesk((state) => state.tables);
+  return tables.map((table) => (
+    <section key={table.id} className="sheet-section">
+      <h3>{table.heading}</h3>
+      <div className="scroll-x">
+        <table className="sheet-table">
+          <thead>
+            <tr>
+              {table.columns.map((column) => (
+                <th key={column} scope="col">
+                  {column}
+                </th>
+              ))}
+            </tr>
+          </thead>
+          <tbody>
+            {numbered(table.rows).map(({ cells, number }) => (
+              <tr key={number}>
+                {table.columns.map((column, index) => (
+                  <td key={column}>{cells[index]}</td>
+                ))}
+              </tr>
+            ))}
+          </tbody>
+        </table>
+      </div>
+    </section>
+  ));
+};
+
 const useFactsOfStatements = () => {
   const { store } = useDeskTools();
   return useMemo(() => {
@@ -115,6 +148,7 @@ export const SheetPane = ({ unit }: { unit: UnitView }) => {
       ) : (
         <StillSheet />
       )}
+      <Tables />
       <TakenOut />
     </article>
   );

@@ -1,5 +1,5 @@
 import { type Answer, type Flag, flagKey, isAnswered, type Level, levels } from '../../domain/checks/flag.ts';
-import type { Draft, Sheet } from '../../domain/drafting/sheet.ts';
+import type { Draft, DraftedTable, Sheet } from '../../domain/drafting/sheet.ts';
 import type { Figure } from '../../domain/physics/numbers.ts';
 import { covers, type FieldPath, withValue } from '../../domain/record/paths.ts';
 import { withoutNumbered } from '../../domain/record/remove-numbered.ts';
@@ -26,6 +26,8 @@ export const panes: readonly Pane[] = ['record', 'sheet', 'margin'];
 export interface DeskState {
   readonly record: CaseRecord;
   readonly sheet: Sheet;
+  /** Tables that stand under the words, drawn from the record alone. */
+  readonly tables: readonly DraftedTable[];
   readonly answers: readonly Answer[];
   readonly flags: readonly Flag[];
   readonly figures: readonly Figure[];
@@ -53,7 +55,10 @@ export interface DeskState {
   readonly future: readonly CaseRecord[];
 }
 
-type Derived = Pick<DeskState, 'record' | 'sheet' | 'answers' | 'flags' | 'figures' | 'levels' | 'described'>;
+type Derived = Pick<
+  DeskState,
+  'record' | 'sheet' | 'tables' | 'answers' | 'flags' | 'figures' | 'levels' | 'described'
+>;
 
 export type DeskStore = ReturnType<typeof createDeskStore>;
 
@@ -98,16 +103,19 @@ export const createDeskStore = (start: Content & { stage: Stage }, derive: Deriv
 
   const derived = (record: CaseRecord, sheet: Sheet | null, answers: readonly Answer[]): Derived => {
     const flags = steady(last?.flags, derive.check(record));
-    last = {
+    const draft = derive.draft(record);
+    const now: Derived = {
       record,
       answers,
       flags,
       figures: steady(last?.figures, derive.figures(record)),
       levels: worstLevels(flags, answers),
       described: flags === last?.flags ? last.described : descriptions(flags),
-      sheet: steady(sheet ?? undefined, derive.merge(sheet, derive.draft(record))),
+      sheet: steady(sheet ?? undefined, derive.merge(sheet, draft)),
+      tables: steady(last?.tables, draft.tables),
     };
-    return last;
+    last = now;
+    return now;
   };
 
   let state: DeskState = {
