@@ -3,7 +3,9 @@ import { defineConfig } from 'vitest/config';
 export default defineConfig({
   test: {
     projects: [
-      { test: { name: 'unit', include: ['tests/unit/**/*.test.ts', 'src/**/*.test.ts'] } },
+      {
+        test: { name: 'unit', testTimeout: 60_000, include: ['tests/unit/**/*.test.ts', 'src/**/*.test.ts'] },
+      },
       { test: { name: 'golden', include: ['tests/golden/**/*.test.ts'] } },
       { test: { name: 'external', include: ['tests/external/**/*.test.ts'] } },
       {

@@ -111,8 +111,11 @@ export const supportBy = (lying: LyingBreak, element: LyingElement): Support | u
 
 const SAMPLES = [-1, -0.5, 0, 0.5, 1] as const;
 
-/** Length, mm, of [from, to] that none of the intervals covers. */
+/** Length, mm, of [from, to] that none of the intervals covers; for a point, how far it lies from the nearest. */
 const uncovered = (from: number, to: number, intervals: readonly Edges[]): number => {
+  if (to <= from) {
+    return Math.min(...intervals.map(([front, back]) => Math.max(0, front - from, from - back)));
+  }
   let reached = from;
   let bare = 0;
   for (const [front, back] of [...intervals].sort((a, b) => a[0] - b[0])) {
@@ -126,8 +129,8 @@ const uncovered = (from: number, to: number, intervals: readonly Edges[]): numbe
 export interface CombinedSupport {
   /** The widest gap in front-to-back cover over the break's own breadth, mm; 0 when it is held everywhere. */
   shortfallMm: number;
-  /** Breadth of the break, clock hours, over which no element reaches its clock hour at all. */
-  bareHours: number;
+  /** Share of the break's breadth, 0 to 1, at whose clock hours no element lies at all. */
+  bare: number;
 }
 
 /** Support of a break by all elements together, as a band with a meridional element under it. */
@@ -142,22 +145,10 @@ export const supportByAll = (lying: LyingBreak, elements: readonly LyingElement[
       return here === null ? [] : [here];
     });
     if (edges.length === 0) bare += 1;
-    // A break of no depth still needs an element under it.
-    const depth = Math.max(lying.backMm, lying.frontMm + 0.01);
-    shortfallMm = Math.max(shortfallMm, uncovered(lying.frontMm, depth, edges));
+    else shortfallMm = Math.max(shortfallMm, uncovered(lying.frontMm, lying.backMm, edges));
   }
   return {
-    shortfallMm: shortfallMm <= 0.011 && bare === 0 && lying.backMm > lying.frontMm ? 0 : shortfallMm,
-    bareHours: (bare / at.length) * lying.halfHours * 2,
+    shortfallMm,
+    bare: bare / at.length,
   };
-};
-
-/** Distance, mm, from the nearest edge of any element to a break that none holds; 0 when held. */
-export const missMm = (lying: LyingBreak, elements: readonly LyingElement[]): number => {
-  const misses = elements.map((element) => {
-    const edges = element.at(lying.clock);
-    if (edges === null) return Number.POSITIVE_INFINITY;
-    return Math.max(0, edges[0] - lying.frontMm, lying.backMm - edges[1]);
-  });
-  return Math.min(...misses);
 };
