@@ -32,7 +32,7 @@ const assemble = (plan: Plan): CaseRecord => {
   const vitreous = vitreousStage(plan);
   const drainage = drainageStage(plan, vitreous);
   const retinopexy = retinopexyOf(plan, Array.isArray(vitreous.retinotomies));
-  const tamponade = tamponadeStage(plan, vitreous.heavyLiquid !== 'none');
+  const tamponade = tamponadeStage(plan, vitreous.heavyLiquid !== 'none', drainage.kind === 'external');
   const written = { who, before, vitreous, drainage, tamponade };
   const record: CaseRecord = {
     version: RECORD_VERSION,

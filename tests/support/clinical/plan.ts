@@ -61,6 +61,13 @@ const planBand = (random: Random, axialLengthMm: number, age: number): Band => {
   };
 };
 
+/** Expanding gas beside a buckle is for breaks above. */
+const agentFor = (random: Random, scenario: Scenario, clock: number) => {
+  const agent = random.weighted(scenario.agents);
+  const below = clock > 3.25 && clock < 8.75;
+  return agent === 'SF6' && !scenario.vitrectomy && scenario.buckle !== 'none' && below ? 'none' : agent;
+};
+
 /** A case of any kind of operation; the same number gives the same case. */
 export const planFrom = (start: number): Plan => {
   const random = randomFrom(start);
@@ -100,7 +107,7 @@ export const planFrom = (start: number): Plan => {
     detachment,
     breaks: planBreaks(where, clock),
     band,
-    agent: heavyLiquidStays ? 'none' : random.weighted(scenario.agents),
+    agent: heavyLiquidStays ? 'none' : agentFor(random, scenario, clock),
     heavyLiquidStays,
     general: age < 18 || random.chance(scenario.name === 'pneumatic retinopexy' ? 0 : 0.35),
   };

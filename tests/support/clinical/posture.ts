@@ -32,8 +32,9 @@ const reach = (plan: Plan, tamponade: Tamponade): number => {
 
 /** Positions in which every break lies under the bubble at some time of the day, the breaks as high as possible. */
 const positionsFor = (plan: Plan, tamponade: Tamponade): readonly Position[] => {
-  const { random, axialLengthMm } = plan;
-  const places = plan.breaks.flatMap((found) =>
+  const { random, axialLengthMm, scenario } = plan;
+  const beside = !scenario.vitrectomy && scenario.buckle !== 'none';
+  const places = (beside ? plan.breaks.slice(0, 1) : plan.breaks).flatMap((found) =>
     found.clock === undefined || found.front === undefined || found.back === undefined
       ? []
       : [{ clock: found.clock, mm: (found.front + found.back) / 2 }],
@@ -43,6 +44,8 @@ const positionsFor = (plan: Plan, tamponade: Tamponade): readonly Position[] => 
   const half = reach(plan, tamponade);
   const highest = choicesInOrder.filter((positions) => worst(positions) <= Math.min(60, half - 8));
   if (highest.length > 0) return random.pick(highest.slice(0, 3));
+  // A little air beside a buckle only restores the volume.
+  if (beside) return [];
   const wetted = [...choicesInOrder].sort((a, b) => worst(a) - worst(b));
   return wetted[0] ?? ['face-down'];
 };
@@ -78,5 +81,7 @@ export const postureOf = (
   if (scenario.disease === 'giant-tear') {
     return [course(plan, 'face-down', random.whole(2, 5))];
   }
-  return positionsFor(plan, tamponade).map((position) => course(plan, position, daysFor(plan)));
+  const positions = positionsFor(plan, tamponade);
+  if (positions.length === 0) return 'none';
+  return positions.map((position) => course(plan, position, daysFor(plan)));
 };

@@ -19,20 +19,25 @@ const notMixed = {
 } as const;
 
 /** A small bubble put in beside a buckle, or alone. */
-const injected = (plan: Plan): Tamponade => {
+const injected = (plan: Plan, drained: boolean): Tamponade => {
   const { random } = plan;
   const alone = plan.scenario.name === 'pneumatic retinopexy';
   const clock = { injectedAtClock: random.pick([10, 11, 1, 2, 12]) };
   if (plan.agent === 'air') {
-    const volumeMl = alone ? random.stepped(0.7, 1, 0.1) : random.stepped(0.4, 1, 0.1);
+    // Without drainage there is room only for what a paracentesis makes.
+    const volumeMl = alone
+      ? random.stepped(0.7, 1, 0.1)
+      : drained
+        ? random.stepped(0.4, 1, 0.1)
+        : random.stepped(0.2, 0.3, 0.1);
     return {
       agent: 'air',
       ...notMixed,
       volumeMl,
       fillPercent: Math.round((volumeMl / cavityMl(plan.axialLengthMm)) * 100),
       exchange: 'injection',
-      paracentesis: alone,
-      ...(alone ? { paracentesisVolumeMl: random.stepped(0.2, 0.4, 0.1) } : {}),
+      paracentesis: alone || !drained,
+      ...(alone || !drained ? { paracentesisVolumeMl: random.stepped(0.2, 0.4, 0.1) } : {}),
       iridectomy: 'none',
       ...clock,
     };
@@ -123,7 +128,7 @@ const oil = (plan: Plan, usedHeavyLiquid: boolean): Tamponade => {
   };
 };
 
-export const tamponadeStage = (plan: Plan, usedHeavyLiquid: boolean): Tamponade => {
+export const tamponadeStage = (plan: Plan, usedHeavyLiquid: boolean, drained: boolean): Tamponade => {
   const { agent, scenario } = plan;
   if (agent === 'none') {
     const soft = !scenario.vitrectomy && plan.random.chance(0.15);
@@ -134,7 +139,7 @@ export const tamponadeStage = (plan: Plan, usedHeavyLiquid: boolean): Tamponade 
       ...(soft ? { paracentesisVolumeMl: 0.2 } : {}),
     };
   }
-  if (!scenario.vitrectomy) return injected(plan);
+  if (!scenario.vitrectomy) return injected(plan, drained);
   if (isOil(agent)) return oil(plan, usedHeavyLiquid);
   if (agent !== 'air') return mixed(plan);
   return {

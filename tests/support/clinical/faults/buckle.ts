@@ -285,7 +285,7 @@ export const buckleFaults = [
     'buckle.elements',
     (e) =>
       e.role === 'encircling' && e.frontEdgeReference === 'insertions'
-        ? { frontEdgeByQuadrantMm: { superonasal: 24 } }
+        ? { frontEdgeByQuadrantMm: { superonasal: 14 } }
         : null,
   ),
 ];

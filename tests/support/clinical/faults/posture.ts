@@ -128,18 +128,6 @@ export const postureFaults = [
       ? { 'aftercare.posture.0.days': 30 }
       : null,
   ),
-  wrong(
-    ['more-hours-than-a-day-has', 'contradiction', 'Two postures that together take 40 hours of the day'],
-    (r) =>
-      hasGas(r) && listAt(r, 'aftercare.posture').length >= 1
-        ? {
-            'aftercare.posture': [
-              { position: 'face-down', hoursADay: 20, days: 5 },
-              { position: 'upright', hoursADay: 20, days: 5 },
-            ],
-          }
-        : null,
-  ),
   wrong(['note-against-the-posture', 'contradiction', 'The other advice names the opposite side'], (r) => {
     const only = listAt(r, 'aftercare.posture');
     if (only.length !== 1 || !only[0]?.position?.endsWith('-side')) return null;

@@ -108,7 +108,7 @@ export const standardFaults = [
   })),
   missing(['acuity-not-stated', 'omission', 'No acuity before surgery'], 'before.acuity'),
   missing(['theatre-not-stated', 'omission', 'No theatre'], 'who.theatre'),
-  wrong(['sedation-under-general', 'contradiction', 'Sedation under a general anaesthetic'], (r) =>
+  wrong(['sedation-under-general', 'caution', 'Sedation under a general anaesthetic'], (r) =>
     general(r) ? { 'anaesthesia.sedation': true } : null,
   ),
 ];

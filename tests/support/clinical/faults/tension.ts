@@ -46,7 +46,7 @@ export const tensionFaults = [
         : null,
   ),
   tension.wrong(
-    ['disc-pale-and-left', 'contradiction', 'Disc not perfused, no complication, nothing done'],
+    ['disc-pale-and-left', 'omission', 'Disc not perfused, no complication, nothing done'],
     () => ({
       'endOfCase.discPerfused': false,
     }),
@@ -69,7 +69,7 @@ export const tensionFaults = [
   tension.wrong(
     [
       'retinal-artery-shut-but-disc-perfused',
-      'contradiction',
+      'omission',
       'Artery not perfused as complication with nothing done',
     ],
     () => ({
@@ -79,7 +79,7 @@ export const tensionFaults = [
 ];
 
 export const closureFaults = [
-  closure.inItem(['band-twisted', 'contradiction', 'Cut ends do not match'], 'buckle.elements', (e) =>
+  closure.inItem(['band-twisted', 'caution', 'Cut ends do not match'], 'buckle.elements', (e) =>
     typeof e.closure === 'object' ? { 'closure.endsMatch': false } : null,
   ),
   closure.inItem(
@@ -122,7 +122,7 @@ export const closureFaults = [
   closure.inItem(
     [
       'temporary-behind-a-lasting-sleeve',
-      'contradiction',
+      'omission',
       'Called temporary, joined by a sleeve, no removal planned',
     ],
     'buckle.elements',

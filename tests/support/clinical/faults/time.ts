@@ -17,9 +17,11 @@ export const timeFaults = [
   wrong(['end-dated-a-month-late', 'contradiction', 'The end is dated the next month'], (r) => ({
     'who.endedAt': addMinutes(r.who?.endedAt ?? '', 30 * 1440),
   })),
-  wrong(['two-minute-operation', 'caution', 'Start and end two minutes apart'], (r) => ({
-    'who.endedAt': addMinutes(r.who?.startedAt ?? '', 2),
-  })),
+  wrong(['two-minute-operation', 'caution', 'Start and end two minutes apart'], (r) =>
+    r.who?.performed?.includes('pneumatic-retinopexy')
+      ? null
+      : { 'who.endedAt': addMinutes(r.who?.startedAt ?? '', 2) },
+  ),
   wrong(['time-out-after-the-first-cut', 'contradiction', 'The time-out is timed after the start'], (r) => ({
     'who.timeOutAt': addMinutes(r.who?.startedAt ?? '', 12),
   })),
@@ -38,9 +40,11 @@ export const timeFaults = [
   wrong(['born-after-the-operation', 'contradiction', 'Date of birth after the operation'], (r) => ({
     'who.patient.dateOfBirth': addDays(day(r), 3),
   })),
-  wrong(['age-of-a-hundred-and-forty', 'contradiction', 'Date of birth a century too early'], (r) => ({
-    'who.patient.dateOfBirth': addDays(r.who?.patient?.dateOfBirth ?? '', -36525),
-  })),
+  wrong(['age-of-a-hundred-and-forty', 'contradiction', 'Date of birth a century too early'], (r) =>
+    (r.who?.patient?.dateOfBirth ?? '9') < '1990'
+      ? { 'who.patient.dateOfBirth': addDays(r.who?.patient?.dateOfBirth ?? '', -36525) }
+      : null,
+  ),
   wrong(
     [
       'nitrous-oxide-stopped-after-the-end',

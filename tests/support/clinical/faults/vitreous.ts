@@ -69,7 +69,7 @@ export const vitreousFaults = [
     (r) => vitrectomized(r) && r.before?.diagnosis === 'giant-tear',
   ),
   wrong(
-    ['heavy-liquid-forgotten', 'contradiction', 'Heavy liquid could not be removed, yet no complication'],
+    ['heavy-liquid-forgotten', 'omission', 'Heavy liquid could not be removed, yet no complication'],
     (r) =>
       r.vitreous?.heavyLiquid === 'removed' && r.endOfCase?.complications === 'none'
         ? { 'vitreous.heavyLiquid': 'not-removed' }
@@ -243,7 +243,7 @@ export const drainageFaults = [
     ['all-drained-yet-detached', 'contradiction', 'Drained completely, retina still detached'],
     (r) => (r.drainage?.outcome === 'complete' ? { 'endOfCase.retina': 'detached' } : null),
   ),
-  drainage.wrong(['fluid-left-yet-flat', 'contradiction', 'Some fluid left at drainage, retina flat'], (r) =>
+  drainage.wrong(['fluid-left-yet-flat', 'caution', 'Some fluid left at drainage, retina flat'], (r) =>
     r.drainage?.kind === 'external' && r.drainage.outcome === 'partial'
       ? { 'endOfCase.retina': 'flat', 'endOfCase.fluidLeftWhere': undefined }
       : null,
