@@ -12,7 +12,7 @@ import {
 } from './globe.ts';
 import { type Band, type Plan, type PlannedBreak, zoneOf } from './planned.ts';
 import { type Random, round } from './random.ts';
-import type { Scenario } from './scenarios.ts';
+import type { Scenario } from './scenario.ts';
 
 interface Where {
   random: Random;

@@ -1,7 +1,7 @@
 import type { Eye, Quadrant } from '../../../src/domain/record/schema.ts';
 import { clockwise, quadrantsClockwise, sharedHours, within, wrap } from './globe.ts';
 import type { Random } from './random.ts';
-import type { Scenario } from './scenarios.ts';
+import type { Scenario } from './scenario.ts';
 
 /** How far the retina is off. Without hours when it is total, or when nothing is detached. */
 export interface Detachment {

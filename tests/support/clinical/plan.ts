@@ -3,7 +3,8 @@ import { planBreaks } from './breaks.ts';
 import { planDetachment, primaryClock } from './detachment.ts';
 import type { Band, Plan } from './planned.ts';
 import { type Random, randomFrom, round } from './random.ts';
-import { type Scenario, scenarios } from './scenarios.ts';
+import type { Scenario } from './scenario.ts';
+import { scenarios } from './scenarios.ts';
 
 const axialLength = (random: Random, scenario: Scenario): number => {
   if (scenario.disease === 'macular-hole') return random.stepped(28, 32, 0.01);

@@ -2,7 +2,7 @@ import type { Eye, RetinalBreak, TamponadeAgent } from '../../../src/domain/reco
 import type { Detachment } from './detachment.ts';
 import { equatorMm } from './globe.ts';
 import type { Random } from './random.ts';
-import type { Lens, Scenario } from './scenarios.ts';
+import type { Lens, Scenario } from './scenario.ts';
 
 export interface PlannedBreak {
   kind: NonNullable<RetinalBreak['kind']>;
