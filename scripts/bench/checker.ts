@@ -50,7 +50,7 @@ const pointsAt = (flag: Flag, changed: readonly string[]) =>
     changed.some((path) => covers(field, path) || covers(path, field) || groupOf(field) === groupOf(path)),
   );
 
-const tryFault = (fault: Fault, sound: readonly { record: CaseRecord; flags: Flag[] }[], seed: number) => {
+const tryFault = (fault: Fault, sound: readonly Sound[], seed: number) => {
   const outcome: FaultOutcome = {
     id: fault.id,
     family: fault.family,
@@ -87,39 +87,56 @@ const tryFault = (fault: Fault, sound: readonly { record: CaseRecord; flags: Fla
 
 const perThousand = (count: number, records: number) => Math.round((count / records) * 100_000) / 100;
 
-/** Puts every fault into sound records and counts what the checker finds, and what it says of sound ones. */
-export const benchChecker = ({ records, seed }: { records: number; seed: number }): CheckerBench => {
-  const sound = Array.from({ length: records }, (_, at) => {
+interface Sound {
+  record: CaseRecord;
+  flags: Flag[];
+}
+
+const soundRecords = (records: number, seed: number): Sound[] =>
+  Array.from({ length: records }, (_, at) => {
     const record = cleanRecord(seed + at);
     return { record, flags: checkRecord(record) };
   });
-  const count = (tally: (flags: Flag[], level: Level) => number) =>
-    Object.fromEntries(
-      levels.map((level) => [
-        level,
-        perThousand(
-          sound.reduce((sum, { flags }) => sum + tally(flags, level), 0),
-          records,
-        ),
-      ]),
-    ) as Record<Level, number>;
+
+const alarmsIn = (sound: readonly Sound[], seed: number): Omit<CheckerBench, 'faults'> => {
+  const count = (tally: (flags: Flag[], level: Level) => number): Record<Level, number> => {
+    const of = (level: Level) =>
+      perThousand(
+        sound.reduce((sum, { flags }) => sum + tally(flags, level), 0),
+        sound.length,
+      );
+    return { contradiction: of('contradiction'), omission: of('omission'), caution: of('caution') };
+  };
   const offenders = new Map<string, CheckerBench['offenders'][number]>();
   for (const [at, { flags }] of sound.entries()) {
-    for (const flag of flags) {
-      const known = offenders.get(flag.rule);
-      if (known === undefined) {
-        const example = { record: seed + at, message: flag.message };
-        offenders.set(flag.rule, { rule: flag.rule, level: flag.level, count: 1, example });
-      } else known.count += 1;
+    for (const { rule, level, message } of flags) {
+      const known = offenders.get(rule);
+      if (known === undefined)
+        offenders.set(rule, { rule, level, count: 1, example: { record: seed + at, message } });
+      else known.count += 1;
     }
   }
   return {
-    records,
-    faults: faults.map((fault) => tryFault(fault, sound, seed)),
+    records: sound.length,
     falseFlags: count((flags, level) => flags.filter((flag) => flag.level === level).length),
     recordsFlagged: count((flags, level) => (flags.some((flag) => flag.level === level) ? 1 : 0)),
     offenders: [...offenders.values()].sort((a, b) => b.count - a.count),
   };
+};
+
+/** What the checker says of sound records alone. */
+export const falseAlarms = ({
+  records,
+  seed,
+}: {
+  records: number;
+  seed: number;
+}): Omit<CheckerBench, 'faults'> => alarmsIn(soundRecords(records, seed), seed);
+
+/** Puts every fault into sound records and counts what the checker finds, and what it says of sound ones. */
+export const benchChecker = ({ records, seed }: { records: number; seed: number }): CheckerBench => {
+  const sound = soundRecords(records, seed);
+  return { ...alarmsIn(sound, seed), faults: faults.map((fault) => tryFault(fault, sound, seed)) };
 };
 
 const line = (cells: readonly (string | number)[]) => cells.map(String).join('\t');

@@ -15,6 +15,8 @@ import { type Random, round } from './random.ts';
 import type { Scenario } from './scenario.ts';
 
 interface Where {
+  /** The vitreous has not come away: holes, no tears. */
+  attached: boolean;
   random: Random;
   scenario: Scenario;
   eye: Eye;
@@ -42,10 +44,11 @@ const freeEdges = (where: Where, clock: number, long: number) => {
   return { front: start, back: round(start + long, 0.5) };
 };
 
-const kindOf = (random: Random, scenario: Scenario): PlannedBreak['kind'] =>
-  scenario.disease === 'round-holes'
+const kindOf = ({ random, scenario, attached }: Where): PlannedBreak['kind'] => {
+  if (attached) return 'round-hole';
+  return scenario.disease === 'round-holes'
     ? random.weighted([
-        [8, 'round-hole'],
+        [7, 'round-hole'],
         [1, 'operculated'],
         [1, 'horseshoe'],
       ])
@@ -54,10 +57,11 @@ const kindOf = (random: Random, scenario: Scenario): PlannedBreak['kind'] =>
         [2, 'round-hole'],
         [1, 'operculated'],
       ]);
+};
 
 const ordinary = (where: Where, clock: number, leading: boolean): PlannedBreak => {
   const { random, scenario, band, eye, detachment } = where;
-  const kind = leading && scenario.disease !== 'round-holes' ? 'horseshoe' : kindOf(random, scenario);
+  const kind = leading && scenario.disease !== 'round-holes' ? 'horseshoe' : kindOf(where);
   const long = kind === 'horseshoe' ? random.stepped(1, 3.5, 0.5) : random.stepped(0.5, 1, 0.5);
   const extent = kind === 'horseshoe' ? random.stepped(0.25, 0.5, 0.25) : random.stepped(0.1, 0.2, 0.05);
   const local = scenario.buckle === 'band-and-segment' || scenario.buckle === 'band-and-under-band';

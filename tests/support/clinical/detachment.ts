@@ -63,7 +63,9 @@ const extentFrom = (random: Random, clock: number, small: boolean): { from: numb
   // Below the horizontal, fluid stands higher on the side of the break.
   const below = fromTop > 3.75 && fromTop < 8.25;
   const toBottom = Math.abs(fromTop - 6);
-  const higher = Math.min(near + (below ? 1 : 0), fromTop < 6 ? fromTop : 12 - fromTop);
+  const underHorizontal = 3 - toBottom;
+  const rise = below ? Math.max(near, Math.min(near + 1, underHorizontal)) : near;
+  const higher = Math.min(rise, fromTop < 6 ? fromTop : 12 - fromTop);
   const lower = below ? Math.min(far, toBottom * 2 + higher - 0.5) : far;
   const reach = Math.max(lower, 0.75);
   return fromTop <= 6

@@ -87,7 +87,8 @@ export const planFrom = (start: number): Plan => {
       : undefined;
   const clock = primaryClock(random, scenario, eye);
   const detachment = planDetachment(random, scenario, clock, eye);
-  const where = { random, scenario, eye, axialLengthMm, detachment, band };
+  const pvd = posteriorVitreous(random, scenario, age, redo);
+  const where = { random, attached: pvd === 'none', scenario, eye, axialLengthMm, detachment, band };
   const heavyLiquidStays = ['giant-tear', 'pvr'].includes(scenario.disease) && random.chance(0.07);
   return {
     random,
@@ -104,7 +105,7 @@ export const planFrom = (start: number): Plan => {
     keratometryDioptres: round(random.stepped(41, 46, 0.01), 0.01),
     redo,
     bandFromBefore: redo && band === undefined && random.chance(0.3),
-    pvd: posteriorVitreous(random, scenario, age, redo),
+    pvd,
     detachment,
     breaks: planBreaks(where, clock),
     band,
