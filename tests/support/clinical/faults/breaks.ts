@@ -1,6 +1,6 @@
 import type { CaseRecord } from '../../../../src/domain/record/schema.ts';
 import { isDetachedAt } from '../detachment.ts';
-import { apart, quadrantOf, wrap } from '../globe.ts';
+import { apart, equatorMm, quadrantOf, wrap } from '../globe.ts';
 import { hasGas, inFamily, listAt } from './fault.ts';
 
 const { wrong, missing, inItem } = inFamily('breaks');
@@ -12,11 +12,17 @@ const extentOf = (r: CaseRecord) => ({
   quadrants: r.before?.quadrantsDetached ?? 0,
 });
 
+/** Clear of a border of quadrants, where two readers may differ. */
+const clearOf = (clock: number | undefined, ...borders: number[]) =>
+  clock !== undefined && borders.every((border) => apart(border, clock) >= 0.75);
+
+const axial = (r: CaseRecord) => r.before?.axialLengthMm ?? 24;
+
 export const breakFaults = [
   inItem(
     ['clock-mirrored', 'contradiction', 'The clock hour is mirrored; the quadrant is right'],
     'breaks.found',
-    (b) => (b.clock === undefined || b.clock % 6 === 0 ? null : { clock: wrap(12 - (b.clock % 12)) }),
+    (b) => (clearOf(b.clock, 12, 6) ? { clock: wrap(12 - ((b.clock ?? 12) % 12)) } : null),
   ),
   inItem(
     ['clock-upside-down', 'contradiction', 'The clock hour is read upside down, as on a drawing turned over'],
@@ -27,7 +33,7 @@ export const breakFaults = [
     ['superior-for-inferior', 'contradiction', 'Superior written for inferior, or the other way'],
     'breaks.found',
     (b) =>
-      b.quadrant === undefined || (b.clock ?? 3) % 3 === 0
+      b.quadrant === undefined || !clearOf(b.clock, 3, 9)
         ? null
         : {
             quadrant: b.quadrant.startsWith('supero')
@@ -88,8 +94,10 @@ export const breakFaults = [
   inItem(
     ['break-beyond-the-disc', 'contradiction', 'A break 38 mm behind the limbus'],
     'breaks.found',
-    (b) =>
-      b.backEdgeMm === undefined ? null : { frontEdgeMm: 36, backEdgeMm: 38, supportedByElements: 'none' },
+    (b, r) =>
+      b.backEdgeMm === undefined || axial(r) > 26
+        ? null
+        : { frontEdgeMm: 36, backEdgeMm: 38, supportedByElements: 'none' },
   ),
   inItem(
     ['zone-does-not-fit-the-distance', 'contradiction', 'Posterior pole for a break in front of the equator'],
@@ -99,7 +107,10 @@ export const breakFaults = [
   inItem(
     ['behind-the-equator-at-nine', 'contradiction', 'Behind the equator, and 9 to 11 mm behind the limbus'],
     'breaks.found',
-    (b) => (b.zone === 'pre-equatorial' && (b.backEdgeMm ?? 99) <= 11 ? { zone: 'post-equatorial' } : null),
+    (b, r) =>
+      b.zone === 'pre-equatorial' && (b.backEdgeMm ?? 99) <= Math.min(11, equatorMm(axial(r)) - 2)
+        ? { zone: 'post-equatorial' }
+        : null,
   ),
   inItem(
     ['dialysis-behind-the-equator', 'contradiction', 'A dialysis behind the equator'],

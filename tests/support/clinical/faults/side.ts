@@ -1,3 +1,4 @@
+import { apart } from '../globe.ts';
 import { buckled, inFamily, listAt, otherEye } from './fault.ts';
 
 const { wrong, missing, inItem } = inFamily('side');
@@ -40,7 +41,13 @@ export const sideFaults = [
     ['nasal-for-temporal-break', 'contradiction', 'Nasal and temporal are changed over for a break'],
     'breaks.found',
     (b) => {
-      if (b.quadrant === undefined || b.clock === undefined || b.clock % 3 === 0) return null;
+      if (
+        b.quadrant === undefined ||
+        b.clock === undefined ||
+        apart(b.clock, 12) < 0.75 ||
+        apart(b.clock, 6) < 0.75
+      )
+        return null;
       return {
         quadrant: b.quadrant.includes('nasal')
           ? b.quadrant.replace('nasal', 'temporal')

@@ -98,7 +98,7 @@ export const timeFaults = [
     }),
   ),
   wrong(
-    ['macula-off-longer-than-symptoms', 'contradiction', 'Macula off for longer than there were symptoms'],
+    ['macula-off-longer-than-symptoms', 'caution', 'Macula off for longer than there were symptoms'],
     (r) =>
       typeof r.before?.maculaOffDays === 'number'
         ? { 'before.maculaOffDays': r.before.maculaOffDays + 400 }
