@@ -4,6 +4,7 @@ import { type FieldPath, valueAt } from '../../domain/record/paths.ts';
 import { Field } from './Field.tsx';
 import { Figures } from './Figures.tsx';
 import { isShown, specNamed } from './field-order.ts';
+import { focusSoon } from './focus-field.ts';
 import { layoutOf, type Row } from './stage-layouts.ts';
 import { useDesk, useDeskTools } from './use-desk.ts';
 
@@ -13,6 +14,24 @@ interface GroupProps {
   /** Stands inside a row of another group. */
   nested?: boolean;
 }
+
+/** Says again what is recorded elsewhere, while nothing is recorded here. */
+const SameAs = ({ from, words, to }: { from: FieldPath; words: string; to: FieldPath }) => {
+  const { store, readOnly } = useDeskTools();
+  const offered = useDesk(
+    (state) => valueAt(state.record, from) !== undefined && valueAt(state.record, to) === undefined,
+  );
+  if (!offered || readOnly) return null;
+  const say = () => {
+    store.record(to, valueAt(store.get().record, from));
+    focusSoon(to);
+  };
+  return (
+    <button type="button" className="case-word case-add" onClick={say}>
+      {words}
+    </button>
+  );
+};
 
 const RowLine = memo(({ row, fields, path }: { row: Row; fields: readonly FieldSpec[]; path: FieldPath }) => {
   const shown = useDesk(
@@ -46,6 +65,9 @@ const RowLine = memo(({ row, fields, path }: { row: Row; fields: readonly FieldS
             />
           </span>
         ))}
+        {row.sameAs !== undefined && (
+          <SameAs from={row.sameAs.path} words={row.sameAs.words} to={`${path}.${row.fields[0]}`} />
+        )}
         {placed.length === 1 && placed[0]?.spec.help !== undefined && (
           <span className="case-help">{placed[0].spec.help}</span>
         )}

@@ -75,7 +75,7 @@ export const Margin = ({ desk }: { desk: RefObject<HTMLElement | null> }) => {
     () => sheet.sections.flatMap(standing).filter((statement) => statement.origin === 'parted'),
     [sheet],
   );
-  // After every drawing of the notes, and whenever paper or notes change their size.
+  // After every drawing of the notes, and whenever the words or the size of paper or notes change.
   useLayoutEffect(() => {
     const draw = () => {
       if (desk.current !== null && margin.current !== null) {
@@ -83,11 +83,19 @@ export const Margin = ({ desk }: { desk: RefObject<HTMLElement | null> }) => {
       }
     };
     draw();
-    const observer = new ResizeObserver(draw);
+    const sizes = new ResizeObserver(draw);
+    const words = new MutationObserver(draw);
     const paper = desk.current?.querySelector('.sheet');
-    if (paper !== null && paper !== undefined) observer.observe(paper);
-    for (const note of margin.current?.querySelectorAll('.note') ?? []) observer.observe(note);
-    return () => observer.disconnect();
+    if (paper !== null && paper !== undefined) {
+      sizes.observe(paper);
+      words.observe(paper, { childList: true, characterData: true, subtree: true });
+    }
+    for (const note of margin.current?.querySelectorAll('.note') ?? []) sizes.observe(note);
+    document.fonts.ready.then(draw);
+    return () => {
+      sizes.disconnect();
+      words.disconnect();
+    };
   });
 
   const open = placed.filter(({ flag }) => !isAnswered(flag, answers));

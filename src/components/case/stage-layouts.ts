@@ -17,6 +17,8 @@ export interface Row {
   sizes?: Readonly<Record<string, number>>;
   /** Shorter labels where the row says the rest. */
   short?: Readonly<Record<string, string>>;
+  /** A field elsewhere whose value may be said again with one press, and the words for it. */
+  sameAs?: { path: string; words: string };
   /** Whether the row is of use, given the other values of the group. A row with something recorded is always shown. */
   when?: (value: (name: string) => unknown) => boolean;
 }
@@ -56,7 +58,8 @@ export const layouts: Readonly<Record<string, Layout>> = {
       { label: 'On the consent', fields: ['consentEye'] },
       { label: 'Marked', fields: ['markedEye'] },
       { label: 'At time-out', fields: ['timeOutEye', 'timeOutAt'], between: ['', 'at'] },
-      ...one('urgency', 'performed'),
+      ...one('urgency'),
+      { fields: ['performed'], sameAs: { path: 'who.planned', words: 'as planned' } },
       { label: 'Operation', fields: ['startedAt', 'endedAt'], between: ['', 'to'] },
       { label: 'Surgeon', fields: ['surgeon.name', 'surgeon.role'], between: ['', 'as'] },
       ...one('supervisor', 'assistants', 'anaesthetist'),
@@ -326,7 +329,11 @@ export const layouts: Readonly<Record<string, Layout>> = {
   },
   endOfCase: {
     usual: [
-      { label: 'Diagnosis after', fields: ['postoperativeDiagnosis'] },
+      {
+        label: 'Diagnosis after',
+        fields: ['postoperativeDiagnosis'],
+        sameAs: { path: 'before.diagnosis', words: 'the same as before' },
+      },
       ...one('retina'),
       { fields: ['fluidLeftWhere'], when: isNot('retina', 'flat', undefined) },
       { label: 'Breaks closed', fields: ['breaksClosed'] },
