@@ -5,7 +5,8 @@ import { Field } from './Field.tsx';
 import { Figures } from './Figures.tsx';
 import { isShown, specNamed } from './field-order.ts';
 import { focusSoon } from './focus-field.ts';
-import { layoutOf, type Row } from './stage-layouts.ts';
+import type { Row } from './layouts/row.ts';
+import { layoutOf } from './stage-layouts.ts';
 import { useDesk, useDeskTools } from './use-desk.ts';
 
 interface GroupProps {

@@ -1,7 +1,8 @@
 import { type FieldSpec, fieldTree } from '../../domain/record/field-tree.ts';
 import { type FieldPath, valueAt } from '../../domain/record/paths.ts';
 import type { CaseRecord } from '../../domain/record/schema.ts';
-import { layoutOf, type Row } from './stage-layouts.ts';
+import type { Row } from './layouts/row.ts';
+import { layoutOf } from './stage-layouts.ts';
 
 /** The field of a group by its name in a layout, which may reach into a group inside: `pvr.grade`. */
 export const specNamed = (fields: readonly FieldSpec[], name: string): FieldSpec | undefined => {
