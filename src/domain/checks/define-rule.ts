@@ -52,6 +52,8 @@ export interface Rule {
   source: { text: string; certainty: 'R' | 'R2' | 'M' | 'C' | 'P' };
   /** Whether a reason may answer it. Never true of a contradiction. */
   answerable: boolean;
+  /** Rules that say the same more exactly: where one of them fires, this one is silent. */
+  unless?: readonly string[];
   /** Pure; what is absent is unknown, and unknown is never a contradiction. */
   check: (record: CaseRecord) => Finding[];
   examples: {

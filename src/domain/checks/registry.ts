@@ -1,0 +1,198 @@
+import type { Rule } from './define-rule.ts';
+import { rule as absorbableFixation } from './rules/absorbable-fixation/rule.ts';
+import { rule as allergyAgainstMedicine } from './rules/allergy-against-medicine/rule.ts';
+import { rule as axialLengthFromBeforeBand } from './rules/axial-length-from-before-band/rule.ts';
+import { rule as bandDoesNotFitGlobe } from './rules/band-does-not-fit-globe/rule.ts';
+import { rule as bandFixedInFewQuadrants } from './rules/band-fixed-in-few-quadrants/rule.ts';
+import { rule as bandMayBeTwisted } from './rules/band-may-be-twisted/rule.ts';
+import { rule as bandWithoutClosure } from './rules/band-without-closure/rule.ts';
+import { rule as biteNarrowerThanElement } from './rules/bite-narrower-than-element/rule.ts';
+import { rule as bornAfterSurgery } from './rules/born-after-surgery/rule.ts';
+import { rule as breakEdgesCrossed } from './rules/break-edges-crossed/rule.ts';
+import { rule as breakOffItsZone } from './rules/break-off-its-zone/rule.ts';
+import { rule as breakUnsupported } from './rules/break-unsupported/rule.ts';
+import { rule as breakWithoutRetinopexy } from './rules/break-without-retinopexy/rule.ts';
+import { rule as cephalosporinAfterPenicillinAllergy } from './rules/cephalosporin-after-penicillin-allergy/rule.ts';
+import { rule as clockOutsideQuadrant } from './rules/clock-outside-quadrant/rule.ts';
+import { rule as complicationWithoutAction } from './rules/complication-without-action/rule.ts';
+import { rule as complicationsAgainstOutcome } from './rules/complications-against-outcome/rule.ts';
+import { rule as countDiscrepancyOpen } from './rules/count-discrepancy-open/rule.ts';
+import { rule as dateOutOfOrder } from './rules/date-out-of-order/rule.ts';
+import { rule as detachmentWithoutDetachment } from './rules/detachment-without-detachment/rule.ts';
+import { rule as diagnosisAgainstBreaks } from './rules/diagnosis-against-breaks/rule.ts';
+import { rule as dilutionWrong } from './rules/dilution-wrong/rule.ts';
+import { rule as discNotPerfusedUnresolved } from './rules/disc-not-perfused-unresolved/rule.ts';
+import { rule as drainageDetailsWithoutDrainage } from './rules/drainage-details-without-drainage/rule.ts';
+import { rule as drainageRetinotomyMissing } from './rules/drainage-retinotomy-missing/rule.ts';
+import { rule as drainageWithoutOutcome } from './rules/drainage-without-outcome/rule.ts';
+import { rule as dropWithoutDose } from './rules/drop-without-dose/rule.ts';
+import { rule as elementWithoutFixation } from './rules/element-without-fixation/rule.ts';
+import { rule as elementWithoutFrontEdge } from './rules/element-without-front-edge/rule.ts';
+import { rule as elementWithoutSize } from './rules/element-without-size/rule.ts';
+import { rule as endsBeforeStart } from './rules/ends-before-start/rule.ts';
+import { rule as expansileConcentration } from './rules/expansile-concentration/rule.ts';
+import { rule as expiredImplant } from './rules/expired-implant/rule.ts';
+import { rule as extentAgainstQuadrants } from './rules/extent-against-quadrants/rule.ts';
+import { rule as fixedDateForFlying } from './rules/fixed-date-for-flying/rule.ts';
+import { rule as fluidAgainstFlat } from './rules/fluid-against-flat/rule.ts';
+import { rule as flyingBeforeGasGone } from './rules/flying-before-gas-gone/rule.ts';
+import { rule as followUpBeforeSurgery } from './rules/follow-up-before-surgery/rule.ts';
+import { rule as gasAdviceMissing } from './rules/gas-advice-missing/rule.ts';
+import { rule as gasAdviceNotGiven } from './rules/gas-advice-not-given/rule.ts';
+import { rule as gasConcentrationMissing } from './rules/gas-concentration-missing/rule.ts';
+import { rule as gasWithoutPosture } from './rules/gas-without-posture/rule.ts';
+import { rule as giantTearTooSmall } from './rules/giant-tear-too-small/rule.ts';
+import { rule as giantTearWithoutPvd } from './rules/giant-tear-without-pvd/rule.ts';
+import { rule as heavyLiquidLeft } from './rules/heavy-liquid-left/rule.ts';
+import { rule as heavyLiquidUseNotRecorded } from './rules/heavy-liquid-use-not-recorded/rule.ts';
+import { rule as heightAboveBound } from './rules/height-above-bound/rule.ts';
+import { rule as horseshoeWithVitreousAttached } from './rules/horseshoe-with-vitreous-attached/rule.ts';
+import { rule as implantWithoutLot } from './rules/implant-without-lot/rule.ts';
+import { rule as internalDrainageWithoutVitrectomy } from './rules/internal-drainage-without-vitrectomy/rule.ts';
+import { rule as lastingClosureTemporaryBand } from './rules/lasting-closure-temporary-band/rule.ts';
+import { rule as lincoffRule } from './rules/lincoff-rule/rule.ts';
+import { rule as maculaOffBeforeSymptoms } from './rules/macula-off-before-symptoms/rule.ts';
+import { rule as maculaOnForDaysOff } from './rules/macula-on-for-days-off/rule.ts';
+import { rule as measuredBloodLossMissing } from './rules/measured-blood-loss-missing/rule.ts';
+import { rule as nitrousOxideAndGas } from './rules/nitrous-oxide-and-gas/rule.ts';
+import { rule as nitrousOxideToTheEnd } from './rules/nitrous-oxide-to-the-end/rule.ts';
+import { rule as oilInAphakicEye } from './rules/oil-in-aphakic-eye/rule.ts';
+import { rule as oilWithoutRemovalPlan } from './rules/oil-without-removal-plan/rule.ts';
+import { rule as oilWithoutViscosity } from './rules/oil-without-viscosity/rule.ts';
+import { rule as performedAgainstStages } from './rules/performed-against-stages/rule.ts';
+import { rule as perfusionNotRecorded } from './rules/perfusion-not-recorded/rule.ts';
+import { rule as planChangedWithoutReason } from './rules/plan-changed-without-reason/rule.ts';
+import { rule as pneumaticBreaksOutOfReach } from './rules/pneumatic-breaks-out-of-reach/rule.ts';
+import { rule as pneumaticVolume } from './rules/pneumatic-volume/rule.ts';
+import { rule as pneumaticWithVitrectomy } from './rules/pneumatic-with-vitrectomy/rule.ts';
+import { rule as postureLeavesBreakDry } from './rules/posture-leaves-break-dry/rule.ts';
+import { rule as postureOnWrongSide } from './rules/posture-on-wrong-side/rule.ts';
+import { rule as postureWithoutDuration } from './rules/posture-without-duration/rule.ts';
+import { rule as pressureAtEnd } from './rules/pressure-at-end/rule.ts';
+import { rule as pureGasAtFullFill } from './rules/pure-gas-at-full-fill/rule.ts';
+import { rule as pvrExtentMissing } from './rules/pvr-extent-missing/rule.ts';
+import { rule as pvrGradeOfOtherEdition } from './rules/pvr-grade-of-other-edition/rule.ts';
+import { rule as requiredAftercare } from './rules/required-aftercare/rule.ts';
+import { rule as requiredAnaesthesia } from './rules/required-anaesthesia/rule.ts';
+import { rule as requiredBefore } from './rules/required-before/rule.ts';
+import { rule as requiredEnd } from './rules/required-end/rule.ts';
+import { rule as requiredFindings } from './rules/required-findings/rule.ts';
+import { rule as requiredSteps } from './rules/required-steps/rule.ts';
+import { rule as requiredWho } from './rules/required-who/rule.ts';
+import { rule as retinopexyKindsDiffer } from './rules/retinopexy-kinds-differ/rule.ts';
+import { rule as retinopexyOfMissingBreak } from './rules/retinopexy-of-missing-break/rule.ts';
+import { rule as reviewDatesDiffer } from './rules/review-dates-differ/rule.ts';
+import { rule as segmentOverHalf } from './rules/segment-over-half/rule.ts';
+import { rule as shortenedTooMuch } from './rules/shortened-too-much/rule.ts';
+import { rule as sideDiffers } from './rules/side-differs/rule.ts';
+import { rule as supportMissesBreak } from './rules/support-misses-break/rule.ts';
+import { rule as supportNotRecorded } from './rules/support-not-recorded/rule.ts';
+import { rule as supportedByMissingElement } from './rules/supported-by-missing-element/rule.ts';
+import { rule as tamponadeDetailsWithoutAgent } from './rules/tamponade-details-without-agent/rule.ts';
+import { rule as temporaryClosurePermanentBand } from './rules/temporary-closure-permanent-band/rule.ts';
+import { rule as tightenedWithoutPressure } from './rules/tightened-without-pressure/rule.ts';
+import { rule as timeOutAfterStart } from './rules/time-out-after-start/rule.ts';
+import { rule as totalDetachmentMaculaOn } from './rules/total-detachment-macula-on/rule.ts';
+import { rule as treatmentForOtherEye } from './rules/treatment-for-other-eye/rule.ts';
+
+/** Changes whenever a rule comes, goes or asks something else; kept with every signature. */
+export const RULES_VERSION = '2026-12-01';
+
+/** Every rule, by id. A test holds this list against the folders. */
+export const rules: readonly Rule[] = [
+  absorbableFixation,
+  allergyAgainstMedicine,
+  axialLengthFromBeforeBand,
+  bandDoesNotFitGlobe,
+  bandFixedInFewQuadrants,
+  bandMayBeTwisted,
+  bandWithoutClosure,
+  biteNarrowerThanElement,
+  bornAfterSurgery,
+  breakEdgesCrossed,
+  breakOffItsZone,
+  breakUnsupported,
+  breakWithoutRetinopexy,
+  cephalosporinAfterPenicillinAllergy,
+  clockOutsideQuadrant,
+  complicationWithoutAction,
+  complicationsAgainstOutcome,
+  countDiscrepancyOpen,
+  dateOutOfOrder,
+  detachmentWithoutDetachment,
+  diagnosisAgainstBreaks,
+  dilutionWrong,
+  discNotPerfusedUnresolved,
+  drainageDetailsWithoutDrainage,
+  drainageRetinotomyMissing,
+  drainageWithoutOutcome,
+  dropWithoutDose,
+  elementWithoutFixation,
+  elementWithoutFrontEdge,
+  elementWithoutSize,
+  endsBeforeStart,
+  expansileConcentration,
+  expiredImplant,
+  extentAgainstQuadrants,
+  fixedDateForFlying,
+  fluidAgainstFlat,
+  flyingBeforeGasGone,
+  followUpBeforeSurgery,
+  gasAdviceMissing,
+  gasAdviceNotGiven,
+  gasConcentrationMissing,
+  gasWithoutPosture,
+  giantTearTooSmall,
+  giantTearWithoutPvd,
+  heavyLiquidLeft,
+  heavyLiquidUseNotRecorded,
+  heightAboveBound,
+  horseshoeWithVitreousAttached,
+  implantWithoutLot,
+  internalDrainageWithoutVitrectomy,
+  lastingClosureTemporaryBand,
+  lincoffRule,
+  maculaOffBeforeSymptoms,
+  maculaOnForDaysOff,
+  measuredBloodLossMissing,
+  nitrousOxideAndGas,
+  nitrousOxideToTheEnd,
+  oilInAphakicEye,
+  oilWithoutRemovalPlan,
+  oilWithoutViscosity,
+  performedAgainstStages,
+  perfusionNotRecorded,
+  planChangedWithoutReason,
+  pneumaticBreaksOutOfReach,
+  pneumaticVolume,
+  pneumaticWithVitrectomy,
+  postureLeavesBreakDry,
+  postureOnWrongSide,
+  postureWithoutDuration,
+  pressureAtEnd,
+  pureGasAtFullFill,
+  pvrExtentMissing,
+  pvrGradeOfOtherEdition,
+  requiredAftercare,
+  requiredAnaesthesia,
+  requiredBefore,
+  requiredEnd,
+  requiredFindings,
+  requiredSteps,
+  requiredWho,
+  retinopexyKindsDiffer,
+  retinopexyOfMissingBreak,
+  reviewDatesDiffer,
+  segmentOverHalf,
+  shortenedTooMuch,
+  sideDiffers,
+  supportMissesBreak,
+  supportNotRecorded,
+  supportedByMissingElement,
+  tamponadeDetailsWithoutAgent,
+  temporaryClosurePermanentBand,
+  tightenedWithoutPressure,
+  timeOutAfterStart,
+  totalDetachmentMaculaOn,
+  treatmentForOtherEye,
+];

@@ -1,0 +1,54 @@
+import { defineRule } from '../../define-rule.ts';
+import { breaksOf, listWords, treatmentsOf } from '../../facts.ts';
+
+export const rule = defineRule({
+  id: 'break-without-retinopexy',
+  family: 'retinopexy',
+  level: 'omission',
+  title: 'A break without retinopexy',
+  why: 'A break without retinopexy is held only as long as what presses on it.',
+  source: { text: 'A break without retinopexy recorded is an omission', certainty: 'P' },
+  answerable: true,
+  check: (record) => {
+    const treatments = record.retinopexy?.treatments;
+    const all = treatmentsOf(record);
+    if (
+      all.some(
+        ({ targets }) => targets === 'all-breaks' || targets === 'circumferential' || targets === undefined,
+      )
+    )
+      return [];
+    const named = new Set(all.flatMap(({ targets }) => (Array.isArray(targets) ? targets : [])));
+    const bare = breaksOf(record).flatMap(({ treatedBy, kind }, index) => {
+      const treated =
+        treatedBy?.some((one) => one !== 'none') === true || named.has(index + 1) || kind === 'macular-hole';
+      return treated ? [] : [index];
+    });
+    if (bare.length === 0) return [];
+    const which = `${bare.length === 1 ? 'Break' : 'Breaks'} ${listWords(bare.map((index) => String(index + 1)))}`;
+    const message = `${which}: no retinopexy is recorded.`;
+    return [
+      {
+        fields: [
+          treatments === undefined ? 'retinopexy.treatments' : `breaks.found.${bare[0]}.treatedBy`,
+          ...bare.map((index) => `breaks.found.${index}.treatedBy`),
+        ],
+        message,
+      },
+    ];
+  },
+  examples: {
+    fires: [{ name: 'none', fields: 'retinopexy.treatments', record: { breaks: { found: [{ clock: 2 }] } } }],
+    silent: [
+      {
+        name: 'cryo to all',
+        record: {
+          breaks: { found: [{ clock: 2 }] },
+          retinopexy: { treatments: [{ modality: 'cryo', targets: 'all-breaks' }] },
+        },
+      },
+      { name: 'macular hole', record: { breaks: { found: [{ kind: 'macular-hole' }] } } },
+    ],
+    unknown: [{ name: 'no break recorded', record: { retinopexy: { treatments: 'none' } } }],
+  },
+});

@@ -1,0 +1,43 @@
+import { defineRule } from '../../define-rule.ts';
+import { elementsOf, lensImplantOf } from '../../facts.ts';
+
+export const rule = defineRule({
+  id: 'implant-without-lot',
+  family: 'implants',
+  level: 'omission',
+  title: 'An implant without its lot',
+  why: 'A recall can only reach patients whose lots are on record.',
+  source: {
+    text: 'Royal College of Surgeons of England, Good Surgical Practice 2014: prosthesis with serial numbers',
+    certainty: 'R2',
+  },
+  answerable: true,
+  check: (record) => {
+    const lens = lensImplantOf(record);
+    const fields = [
+      ...elementsOf(record).flatMap(({ lot }, index) =>
+        lot === undefined ? [`buckle.elements.${index}.lot`] : [],
+      ),
+      ...(lens !== undefined && lens.lot === undefined ? ['vitreous.lensImplant.lot'] : []),
+    ];
+    if (fields.length === 0) return [];
+    const message =
+      fields.length === 1
+        ? 'One implant is recorded without its lot.'
+        : `${fields.length} implants are recorded without their lots.`;
+    return [{ fields, message }];
+  },
+  examples: {
+    fires: [
+      {
+        name: 'band',
+        fields: 'buckle.elements.0.lot',
+        record: { buckle: { elements: [{ role: 'encircling' }] } },
+      },
+    ],
+    silent: [
+      { name: 'lot recorded', record: { buckle: { elements: [{ role: 'encircling', lot: 'D4471' }] } } },
+    ],
+    unknown: [{ name: 'no elements recorded', record: { buckle: {} } }],
+  },
+});
