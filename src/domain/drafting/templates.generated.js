@@ -1,5 +1,5 @@
 // Made from templates/ by scripts/templates.ts; do not edit.
-export const TEMPLATES_VERSION = 'a8d78487abe8';
+export const TEMPLATES_VERSION = '7f5b088b612c';
 export const notes = {
   "operative-note": {"0":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -3168,7 +3168,960 @@ export const notes = {
 },"usePartial":true,"useData":true},
 };
 export const letters = {
+  "family-doctor": {"0":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
 
+  return ((stack1 = lookupProperty(helpers,"statement").call(alias1,"dear",{"name":"statement","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":2,"column":0},"end":{"line":2,"column":102}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"opening",{"name":"statement","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":3,"column":0},"end":{"line":3,"column":251}}})) != null ? stack1 : "")
+    + "\n";
+},"1":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"any").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"eye") : stack1),((stack1 = ((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"patient") : stack1)) != null ? lookupProperty(stack1,"familyName") : stack1),{"name":"any","hash":{},"data":data,"loc":{"start":{"line":2,"column":27},"end":{"line":2,"column":63}}}),{"name":"if","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":2,"column":21},"end":{"line":2,"column":88}}})) != null ? stack1 : "");
+},"2":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "dear "
+    + ((stack1 = container.lambda((depth0 != null ? lookupProperty(depth0,"reader") : depth0), depth0)) != null ? stack1 : "")
+    + ",";
+},"3":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = ((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"patient") : stack1)) != null ? lookupProperty(stack1,"familyName") : stack1),{"name":"if","hash":{},"fn":container.program(4, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":3,"column":24},"end":{"line":3,"column":237}}})) != null ? stack1 : "");
+},"4":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "your patient "
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,((stack1 = ((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"patient") : stack1)) != null ? lookupProperty(stack1,"givenName") : stack1),{"name":"if","hash":{},"fn":container.program(5, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":3,"column":67},"end":{"line":3,"column":129}}})) != null ? stack1 : "")
+    + ((stack1 = container.lambda(((stack1 = ((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"patient") : stack1)) != null ? lookupProperty(stack1,"familyName") : stack1), depth0)) != null ? stack1 : "")
+    + " had an eye operation"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"startedAt") : stack1),{"name":"if","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":3,"column":176},"end":{"line":3,"column":230}}})) != null ? stack1 : "");
+},"5":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.lambda(((stack1 = ((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"patient") : stack1)) != null ? lookupProperty(stack1,"givenName") : stack1), depth0)) != null ? stack1 : "")
+    + " ";
+},"6":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return " on "
+    + ((stack1 = lookupProperty(helpers,"date").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"startedAt") : stack1),{"name":"date","hash":{},"data":data,"loc":{"start":{"line":3,"column":201},"end":{"line":3,"column":223}}})) != null ? stack1 : "");
+},"7":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.invokePartial(lookupProperty(partials,"diagnosis"),depth0,{"name":"diagnosis","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
+},"8":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.invokePartial(lookupProperty(partials,"procedure"),depth0,{"name":"procedure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
+},"9":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"statement").call(alias1,"continue",{"name":"statement","hash":{},"fn":container.program(10, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":12,"column":0},"end":{"line":12,"column":142}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"referral",{"name":"statement","hash":{},"fn":container.program(12, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":13,"column":0},"end":{"line":13,"column":153}}})) != null ? stack1 : "")
+    + "\n";
+},"10":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"isList").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"drops") : stack1),{"name":"isList","hash":{},"data":data,"loc":{"start":{"line":12,"column":31},"end":{"line":12,"column":55}}}),{"name":"if","hash":{},"fn":container.program(11, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":12,"column":25},"end":{"line":12,"column":128}}})) != null ? stack1 : "");
+},"11":function(container,depth0,helpers,partials,data) {
+    return "please go on prescribing the drops below until their course ends";
+},"12":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"eye") : stack1),{"name":"if","hash":{},"fn":container.program(13, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":13,"column":25},"end":{"line":13,"column":139}}})) != null ? stack1 : "");
+},"13":function(container,depth0,helpers,partials,data) {
+    return "please send the patient to us the same day with pain, loss of sight, a new shadow or redness";
+},"14":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.invokePartial(lookupProperty(partials,"courses"),depth0,{"name":"courses","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "")
+    + ((stack1 = container.invokePartial(lookupProperty(partials,"gas-advice"),depth0,{"name":"gas-advice","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "")
+    + ((stack1 = container.invokePartial(lookupProperty(partials,"posture"),depth0,{"name":"posture","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "")
+    + ((stack1 = container.invokePartial(lookupProperty(partials,"review"),depth0,{"name":"review","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
+},"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"section").call(alias1,"salutation","Salutation",{"name":"section","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":4,"column":12}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"diagnosis","Diagnosis",{"name":"section","hash":{},"fn":container.program(7, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":5,"column":0},"end":{"line":7,"column":12}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"procedure","Procedure",{"name":"section","hash":{},"fn":container.program(8, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":8,"column":0},"end":{"line":10,"column":12}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"actions","What we ask of you",{"name":"section","hash":{},"fn":container.program(9, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":11,"column":0},"end":{"line":14,"column":12}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"medicines","Medicines and advice",{"name":"section","hash":{},"fn":container.program(14, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":15,"column":0},"end":{"line":20,"column":12}}})) != null ? stack1 : "");
+},"usePartial":true,"useData":true},
+  "patient": {"0":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"statement").call(alias1,"dear",{"name":"statement","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":2,"column":0},"end":{"line":2,"column":102}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"opening",{"name":"statement","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":3,"column":0},"end":{"line":3,"column":158}}})) != null ? stack1 : "")
+    + "\n";
+},"1":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"any").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"eye") : stack1),((stack1 = ((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"patient") : stack1)) != null ? lookupProperty(stack1,"familyName") : stack1),{"name":"any","hash":{},"data":data,"loc":{"start":{"line":2,"column":27},"end":{"line":2,"column":63}}}),{"name":"if","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":2,"column":21},"end":{"line":2,"column":88}}})) != null ? stack1 : "");
+},"2":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "dear "
+    + ((stack1 = container.lambda((depth0 != null ? lookupProperty(depth0,"reader") : depth0), depth0)) != null ? stack1 : "")
+    + ",";
+},"3":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"eye") : stack1),{"name":"if","hash":{},"fn":container.program(4, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":3,"column":24},"end":{"line":3,"column":144}}})) != null ? stack1 : "");
+},"4":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "you had an operation on your "
+    + ((stack1 = container.lambda(((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"eye") : stack1), depth0)) != null ? stack1 : "")
+    + " eye"
+    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"startedAt") : stack1),{"name":"if","hash":{},"fn":container.program(5, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":3,"column":83},"end":{"line":3,"column":137}}})) != null ? stack1 : "");
+},"5":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return " on "
+    + ((stack1 = lookupProperty(helpers,"date").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"startedAt") : stack1),{"name":"date","hash":{},"data":data,"loc":{"start":{"line":3,"column":108},"end":{"line":3,"column":130}}})) != null ? stack1 : "");
+},"6":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"statement").call(alias1,"wrong",{"name":"statement","hash":{},"fn":container.program(7, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":6,"column":0},"end":{"line":6,"column":281}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"band",{"name":"statement","hash":{},"fn":container.program(11, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":7,"column":0},"end":{"line":7,"column":155}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"vitrectomy",{"name":"statement","hash":{},"fn":container.program(13, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":8,"column":0},"end":{"line":8,"column":111}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"retinopexy",{"name":"statement","hash":{},"fn":container.program(15, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":9,"column":0},"end":{"line":9,"column":132}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"outcome",{"name":"statement","hash":{},"fn":container.program(17, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":10,"column":0},"end":{"line":10,"column":234}}})) != null ? stack1 : "")
+    + "\n";
+},"7":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"before") : depth0)) != null ? lookupProperty(stack1,"diagnosis") : stack1),{"name":"if","hash":{},"fn":container.program(8, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":6,"column":22},"end":{"line":6,"column":267}}})) != null ? stack1 : "");
+},"8":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"before") : depth0)) != null ? lookupProperty(stack1,"diagnosis") : stack1),"break-without-detachment",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":6,"column":52},"end":{"line":6,"column":100}}}),{"name":"if","hash":{},"fn":container.program(9, data, 0),"inverse":container.program(10, data, 0),"data":data,"loc":{"start":{"line":6,"column":46},"end":{"line":6,"column":260}}})) != null ? stack1 : "");
+},"9":function(container,depth0,helpers,partials,data) {
+    return "there was a tear in the retina, the layer at the back of the eye that sees";
+},"10":function(container,depth0,helpers,partials,data) {
+    return "the retina, the layer at the back of the eye that sees, had come away";
+},"11":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"isList").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"buckle") : depth0)) != null ? lookupProperty(stack1,"elements") : stack1),{"name":"isList","hash":{},"data":data,"loc":{"start":{"line":7,"column":27},"end":{"line":7,"column":51}}}),{"name":"if","hash":{},"fn":container.program(12, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":7,"column":21},"end":{"line":7,"column":141}}})) != null ? stack1 : "");
+},"12":function(container,depth0,helpers,partials,data) {
+    return "we put soft silicone on the outside of the eye to support it; you will not see it";
+},"13":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"vitreous") : depth0)) != null ? lookupProperty(stack1,"vitrectomy") : stack1),{"name":"if","hash":{},"fn":container.program(14, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":8,"column":27},"end":{"line":8,"column":97}}})) != null ? stack1 : "");
+},"14":function(container,depth0,helpers,partials,data) {
+    return "we took out the jelly inside the eye";
+},"15":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"isList").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"retinopexy") : depth0)) != null ? lookupProperty(stack1,"treatments") : stack1),{"name":"isList","hash":{},"data":data,"loc":{"start":{"line":9,"column":33},"end":{"line":9,"column":63}}}),{"name":"if","hash":{},"fn":container.program(16, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":9,"column":27},"end":{"line":9,"column":118}}})) != null ? stack1 : "");
+},"16":function(container,depth0,helpers,partials,data) {
+    return "we sealed the tears so that they scar and hold";
+},"17":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"endOfCase") : depth0)) != null ? lookupProperty(stack1,"retina") : stack1),"flat",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":10,"column":30},"end":{"line":10,"column":58}}}),{"name":"if","hash":{},"fn":container.program(18, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":10,"column":24},"end":{"line":10,"column":97}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"endOfCase") : depth0)) != null ? lookupProperty(stack1,"retina") : stack1),"fluid-left",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":10,"column":103},"end":{"line":10,"column":137}}}),{"name":"if","hash":{},"fn":container.program(19, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":10,"column":97},"end":{"line":10,"column":220}}})) != null ? stack1 : "");
+},"18":function(container,depth0,helpers,partials,data) {
+    return "at the end the retina lay flat";
+},"19":function(container,depth0,helpers,partials,data) {
+    return "some fluid is still behind the retina; we expect it to go in the next days";
+},"20":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"statement").call(alias1,"gas",{"name":"statement","hash":{},"fn":container.program(21, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":13,"column":0},"end":{"line":13,"column":309}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"flying",{"name":"statement","hash":{},"fn":container.program(25, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":14,"column":0},"end":{"line":14,"column":267}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"anaesthetic",{"name":"statement","hash":{},"fn":container.program(27, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":15,"column":0},"end":{"line":15,"column":342}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"wristband",{"name":"statement","hash":{},"fn":container.program(29, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":16,"column":0},"end":{"line":16,"column":106}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"oil",{"name":"statement","hash":{},"fn":container.program(31, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":17,"column":0},"end":{"line":17,"column":205}}})) != null ? stack1 : "")
+    + "\n";
+},"21":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"any").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"air",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":13,"column":31},"end":{"line":13,"column":57}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"SF6",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":13,"column":58},"end":{"line":13,"column":84}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"C2F6",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":13,"column":85},"end":{"line":13,"column":112}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"C3F8",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":13,"column":113},"end":{"line":13,"column":140}}}),{"name":"any","hash":{},"data":data,"loc":{"start":{"line":13,"column":26},"end":{"line":13,"column":141}}}),{"name":"if","hash":{},"fn":container.program(22, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":13,"column":20},"end":{"line":13,"column":295}}})) != null ? stack1 : "");
+},"22":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "there is a bubble of "
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"air",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":13,"column":170},"end":{"line":13,"column":196}}}),{"name":"if","hash":{},"fn":container.program(23, data, 0),"inverse":container.program(24, data, 0),"data":data,"loc":{"start":{"line":13,"column":164},"end":{"line":13,"column":219}}})) != null ? stack1 : "")
+    + " in your eye; it goes by itself, and until then your sight is blurred";
+},"23":function(container,depth0,helpers,partials,data) {
+    return "air";
+},"24":function(container,depth0,helpers,partials,data) {
+    return "gas";
+},"25":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"any").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"air",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":14,"column":34},"end":{"line":14,"column":60}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"SF6",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":14,"column":61},"end":{"line":14,"column":87}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"C2F6",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":14,"column":88},"end":{"line":14,"column":115}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"C3F8",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":14,"column":116},"end":{"line":14,"column":143}}}),{"name":"any","hash":{},"data":data,"loc":{"start":{"line":14,"column":29},"end":{"line":14,"column":144}}}),{"name":"if","hash":{},"fn":container.program(26, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":14,"column":23},"end":{"line":14,"column":253}}})) != null ? stack1 : "");
+},"26":function(container,depth0,helpers,partials,data) {
+    return "do not fly and do not travel up mountains until your eye surgeon has confirmed that the gas has gone";
+},"27":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"any").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"air",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":15,"column":39},"end":{"line":15,"column":65}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"SF6",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":15,"column":66},"end":{"line":15,"column":92}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"C2F6",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":15,"column":93},"end":{"line":15,"column":120}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"C3F8",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":15,"column":121},"end":{"line":15,"column":148}}}),{"name":"any","hash":{},"data":data,"loc":{"start":{"line":15,"column":34},"end":{"line":15,"column":149}}}),{"name":"if","hash":{},"fn":container.program(28, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":15,"column":28},"end":{"line":15,"column":328}}})) != null ? stack1 : "");
+},"28":function(container,depth0,helpers,partials,data) {
+    return "tell every doctor and dentist that there is gas in your eye: you must not be given nitrous oxide (laughing gas) until your eye surgeon has confirmed that the gas has gone";
+},"29":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"wristband") : stack1),{"name":"if","hash":{},"fn":container.program(30, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":16,"column":26},"end":{"line":16,"column":92}}})) != null ? stack1 : "");
+},"30":function(container,depth0,helpers,partials,data) {
+    return "keep the wristband on until then";
+},"31":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"any").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"silicone-oil",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":17,"column":31},"end":{"line":17,"column":66}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"heavy-oil",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":17,"column":67},"end":{"line":17,"column":99}}}),{"name":"any","hash":{},"data":data,"loc":{"start":{"line":17,"column":26},"end":{"line":17,"column":100}}}),{"name":"if","hash":{},"fn":container.program(32, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":17,"column":20},"end":{"line":17,"column":191}}})) != null ? stack1 : "");
+},"32":function(container,depth0,helpers,partials,data) {
+    return "there is clear oil in your eye; it stays until we take it out in another operation";
+},"33":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"posture") : stack1),"none",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":20,"column":6},"end":{"line":20,"column":35}}}),{"name":"if","hash":{},"fn":container.program(34, data, 0),"inverse":container.program(37, data, 0),"data":data,"loc":{"start":{"line":20,"column":0},"end":{"line":20,"column":560}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"isList").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"drops") : stack1),{"name":"isList","hash":{},"data":data,"loc":{"start":{"line":21,"column":6},"end":{"line":21,"column":30}}}),{"name":"if","hash":{},"fn":container.program(44, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":0},"end":{"line":21,"column":248}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"tablets") : stack1),{"name":"each","hash":{},"fn":container.program(50, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":22,"column":0},"end":{"line":22,"column":216}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"shield",{"name":"statement","hash":{},"fn":container.program(53, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":23,"column":0},"end":{"line":23,"column":181}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"activity",{"name":"statement","hash":{},"fn":container.program(55, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":24,"column":0},"end":{"line":24,"column":94}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"driving",{"name":"statement","hash":{},"fn":container.program(57, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":25,"column":0},"end":{"line":25,"column":236}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"glasses",{"name":"statement","hash":{},"fn":container.program(60, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":26,"column":0},"end":{"line":26,"column":147}}})) != null ? stack1 : "")
+    + "\n";
+},"34":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"statement").call(depth0 != null ? depth0 : (container.nullContext || {}),"no-posture",{"name":"statement","hash":{},"fn":container.program(35, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":20,"column":37},"end":{"line":20,"column":156}}})) != null ? stack1 : "");
+},"35":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"posture") : stack1),"none",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":20,"column":70},"end":{"line":20,"column":99}}}),{"name":"if","hash":{},"fn":container.program(36, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":20,"column":64},"end":{"line":20,"column":142}}})) != null ? stack1 : "");
+},"36":function(container,depth0,helpers,partials,data) {
+    return "you may hold your head as you like";
+},"37":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"posture") : stack1),{"name":"each","hash":{},"fn":container.program(38, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":20,"column":164},"end":{"line":20,"column":553}}})) != null ? stack1 : "");
+},"38":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"statement").call(depth0 != null ? depth0 : (container.nullContext || {}),"posture",(data && lookupProperty(data,"index")),{"name":"statement","hash":{},"fn":container.program(39, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":20,"column":191},"end":{"line":20,"column":544}}})) != null ? stack1 : "");
+},"39":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"position") : depth0),{"name":"if","hash":{},"fn":container.program(40, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":20,"column":222},"end":{"line":20,"column":530}}})) != null ? stack1 : "");
+},"40":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "keep your head like this: "
+    + ((stack1 = lookupProperty(helpers,"label").call(alias1,"aftercare.posture.position",(depth0 != null ? lookupProperty(depth0,"position") : depth0),{"name":"label","hash":{},"data":data,"loc":{"start":{"line":20,"column":264},"end":{"line":20,"column":311}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,(depth0 != null ? lookupProperty(depth0,"hoursADay") : depth0),{"name":"if","hash":{},"fn":container.program(41, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":20,"column":311},"end":{"line":20,"column":384}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,(depth0 != null ? lookupProperty(depth0,"minutesAnHour") : depth0),{"name":"if","hash":{},"fn":container.program(42, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":20,"column":384},"end":{"line":20,"column":456}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"moreThan").call(alias1,(depth0 != null ? lookupProperty(depth0,"days") : depth0),0,{"name":"moreThan","hash":{},"data":data,"loc":{"start":{"line":20,"column":462},"end":{"line":20,"column":479}}}),{"name":"if","hash":{},"fn":container.program(43, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":20,"column":456},"end":{"line":20,"column":523}}})) != null ? stack1 : "");
+},"41":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ", for "
+    + ((stack1 = lookupProperty(helpers,"figureOf").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"hoursADay") : depth0),"hour","hours",{"name":"figureOf","hash":{},"data":data,"loc":{"start":{"line":20,"column":334},"end":{"line":20,"column":371}}})) != null ? stack1 : "")
+    + " a day";
+},"42":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ", for "
+    + ((stack1 = container.lambda((depth0 != null ? lookupProperty(depth0,"minutesAnHour") : depth0), depth0)) != null ? stack1 : "")
+    + " minutes of each hour";
+},"43":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ", for "
+    + ((stack1 = lookupProperty(helpers,"countOf").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"days") : depth0),"day","days",{"name":"countOf","hash":{},"data":data,"loc":{"start":{"line":20,"column":487},"end":{"line":20,"column":516}}})) != null ? stack1 : "");
+},"44":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"drops") : stack1),{"name":"each","hash":{},"fn":container.program(45, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":32},"end":{"line":21,"column":241}}})) != null ? stack1 : "");
+},"45":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"statement").call(depth0 != null ? depth0 : (container.nullContext || {}),"drop",(data && lookupProperty(data,"index")),{"name":"statement","hash":{},"fn":container.program(46, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":57},"end":{"line":21,"column":232}}})) != null ? stack1 : "");
+},"46":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"drug") : depth0),{"name":"if","hash":{},"fn":container.program(47, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":85},"end":{"line":21,"column":218}}})) != null ? stack1 : "");
+},"47":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "use the "
+    + ((stack1 = container.lambda((depth0 != null ? lookupProperty(depth0,"drug") : depth0), depth0)) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,(depth0 != null ? lookupProperty(depth0,"strength") : depth0),{"name":"if","hash":{},"fn":container.program(48, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":113},"end":{"line":21,"column":149}}})) != null ? stack1 : "")
+    + " drops "
+    + ((stack1 = lookupProperty(helpers,"course").call(alias1,(depth0 != null ? lookupProperty(depth0,"timesADay") : depth0),(depth0 != null ? lookupProperty(depth0,"weeks") : depth0),{"name":"course","hash":{},"data":data,"loc":{"start":{"line":21,"column":156},"end":{"line":21,"column":182}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,(depth0 != null ? lookupProperty(depth0,"note") : depth0),{"name":"if","hash":{},"fn":container.program(49, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":182},"end":{"line":21,"column":211}}})) != null ? stack1 : "");
+},"48":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return " "
+    + ((stack1 = container.lambda((depth0 != null ? lookupProperty(depth0,"strength") : depth0), depth0)) != null ? stack1 : "");
+},"49":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ", "
+    + ((stack1 = container.lambda((depth0 != null ? lookupProperty(depth0,"note") : depth0), depth0)) != null ? stack1 : "");
+},"50":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"statement").call(depth0 != null ? depth0 : (container.nullContext || {}),"tablet",(data && lookupProperty(data,"index")),{"name":"statement","hash":{},"fn":container.program(51, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":22,"column":27},"end":{"line":22,"column":207}}})) != null ? stack1 : "");
+},"51":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"drug") : depth0),{"name":"if","hash":{},"fn":container.program(52, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":22,"column":57},"end":{"line":22,"column":193}}})) != null ? stack1 : "");
+},"52":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "take the "
+    + ((stack1 = container.lambda((depth0 != null ? lookupProperty(depth0,"drug") : depth0), depth0)) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,(depth0 != null ? lookupProperty(depth0,"strength") : depth0),{"name":"if","hash":{},"fn":container.program(48, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":22,"column":86},"end":{"line":22,"column":122}}})) != null ? stack1 : "")
+    + " tablets "
+    + ((stack1 = lookupProperty(helpers,"course").call(alias1,(depth0 != null ? lookupProperty(depth0,"timesADay") : depth0),(depth0 != null ? lookupProperty(depth0,"weeks") : depth0),{"name":"course","hash":{},"data":data,"loc":{"start":{"line":22,"column":131},"end":{"line":22,"column":157}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,(depth0 != null ? lookupProperty(depth0,"note") : depth0),{"name":"if","hash":{},"fn":container.program(49, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":22,"column":157},"end":{"line":22,"column":186}}})) != null ? stack1 : "");
+},"53":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"moreThan").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"shieldNights") : stack1),0,{"name":"moreThan","hash":{},"data":data,"loc":{"start":{"line":23,"column":29},"end":{"line":23,"column":64}}}),{"name":"if","hash":{},"fn":container.program(54, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":23,"column":23},"end":{"line":23,"column":167}}})) != null ? stack1 : "");
+},"54":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "wear the shield over your eye at night for "
+    + ((stack1 = lookupProperty(helpers,"countOf").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"shieldNights") : stack1),"night","nights",{"name":"countOf","hash":{},"data":data,"loc":{"start":{"line":23,"column":109},"end":{"line":23,"column":160}}})) != null ? stack1 : "");
+},"55":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"activity") : stack1),{"name":"if","hash":{},"fn":container.program(56, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":24,"column":25},"end":{"line":24,"column":80}}})) != null ? stack1 : "");
+},"56":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.lambda(((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"activity") : stack1), depth0)) != null ? stack1 : "");
+},"57":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"driving") : stack1),"not-until-review",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":25,"column":30},"end":{"line":25,"column":71}}}),{"name":"if","hash":{},"fn":container.program(58, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":25,"column":24},"end":{"line":25,"column":115}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"driving") : stack1),"as-rules",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":25,"column":121},"end":{"line":25,"column":154}}}),{"name":"if","hash":{},"fn":container.program(59, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":25,"column":115},"end":{"line":25,"column":222}}})) != null ? stack1 : "");
+},"58":function(container,depth0,helpers,partials,data) {
+    return "do not drive until we have seen you";
+},"59":function(container,depth0,helpers,partials,data) {
+    return "drive only when you meet the rules for sight where you live";
+},"60":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"refractiveChangeTold") : stack1),{"name":"if","hash":{},"fn":container.program(61, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":26,"column":24},"end":{"line":26,"column":133}}})) != null ? stack1 : "");
+},"61":function(container,depth0,helpers,partials,data) {
+    return "you may need other glasses later; wait until the eye has settled";
+},"62":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"statement").call(depth0 != null ? depth0 : (container.nullContext || {}),"call",{"name":"statement","hash":{},"fn":container.program(63, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":29,"column":0},"end":{"line":29,"column":166}}})) != null ? stack1 : "")
+    + "\n";
+},"63":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"warningSigns") : stack1),{"name":"if","hash":{},"fn":container.program(64, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":29,"column":21},"end":{"line":29,"column":152}}})) != null ? stack1 : "");
+},"64":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "call us at once, day or night, with "
+    + ((stack1 = lookupProperty(helpers,"labels").call(depth0 != null ? depth0 : (container.nullContext || {}),"aftercare.warningSigns",((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"warningSigns") : stack1),{"name":"labels","hash":{},"data":data,"loc":{"start":{"line":29,"column":87},"end":{"line":29,"column":145}}})) != null ? stack1 : "");
+},"65":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"statement").call(depth0 != null ? depth0 : (container.nullContext || {}),"review",{"name":"statement","hash":{},"fn":container.program(66, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":32,"column":0},"end":{"line":32,"column":394}}})) != null ? stack1 : "")
+    + "\n";
+},"66":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewAt") : stack1),{"name":"if","hash":{},"fn":container.program(67, data, 0),"inverse":container.program(69, data, 0),"data":data,"loc":{"start":{"line":32,"column":23},"end":{"line":32,"column":380}}})) != null ? stack1 : "");
+},"67":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "we see you again on "
+    + ((stack1 = lookupProperty(helpers,"date").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewAt") : stack1),{"name":"date","hash":{},"data":data,"loc":{"start":{"line":32,"column":69},"end":{"line":32,"column":96}}})) != null ? stack1 : "")
+    + " at "
+    + ((stack1 = lookupProperty(helpers,"time").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewAt") : stack1),{"name":"time","hash":{},"data":data,"loc":{"start":{"line":32,"column":100},"end":{"line":32,"column":127}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewPlace") : stack1),{"name":"if","hash":{},"fn":container.program(68, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":32,"column":127},"end":{"line":32,"column":190}}})) != null ? stack1 : "");
+},"68":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ", "
+    + ((stack1 = container.lambda(((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewPlace") : stack1), depth0)) != null ? stack1 : "");
+},"69":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"known").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewInDays") : stack1),{"name":"known","hash":{},"data":data,"loc":{"start":{"line":32,"column":204},"end":{"line":32,"column":234}}}),{"name":"if","hash":{},"fn":container.program(70, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":32,"column":198},"end":{"line":32,"column":373}}})) != null ? stack1 : "");
+},"70":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "we see you again in "
+    + ((stack1 = lookupProperty(helpers,"countOf").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewInDays") : stack1),"day","days",{"name":"countOf","hash":{},"data":data,"loc":{"start":{"line":32,"column":256},"end":{"line":32,"column":303}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewPlace") : stack1),{"name":"if","hash":{},"fn":container.program(68, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":32,"column":303},"end":{"line":32,"column":366}}})) != null ? stack1 : "");
+},"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"section").call(alias1,"salutation","Salutation",{"name":"section","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":4,"column":12}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"what","What was wrong and what we did",{"name":"section","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":5,"column":0},"end":{"line":11,"column":12}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"gas","Gas or oil in your eye",{"name":"section","hash":{},"fn":container.program(20, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":12,"column":0},"end":{"line":18,"column":12}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"do","What to do",{"name":"section","hash":{},"fn":container.program(33, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":19,"column":0},"end":{"line":27,"column":12}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"call","When to call us at once",{"name":"section","hash":{},"fn":container.program(62, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":28,"column":0},"end":{"line":30,"column":12}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"next","Next visit",{"name":"section","hash":{},"fn":container.program(65, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":31,"column":0},"end":{"line":33,"column":12}}})) != null ? stack1 : "");
+},"useData":true},
+  "referring-doctor": {"0":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"statement").call(alias1,"dear",{"name":"statement","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":2,"column":0},"end":{"line":2,"column":102}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"opening",{"name":"statement","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":3,"column":0},"end":{"line":3,"column":373}}})) != null ? stack1 : "")
+    + "\n";
+},"1":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"any").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"eye") : stack1),((stack1 = ((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"patient") : stack1)) != null ? lookupProperty(stack1,"familyName") : stack1),{"name":"any","hash":{},"data":data,"loc":{"start":{"line":2,"column":27},"end":{"line":2,"column":63}}}),{"name":"if","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":2,"column":21},"end":{"line":2,"column":88}}})) != null ? stack1 : "");
+},"2":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "dear "
+    + ((stack1 = container.lambda((depth0 != null ? lookupProperty(depth0,"reader") : depth0), depth0)) != null ? stack1 : "")
+    + ",";
+},"3":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = ((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"patient") : stack1)) != null ? lookupProperty(stack1,"familyName") : stack1),{"name":"if","hash":{},"fn":container.program(4, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":3,"column":24},"end":{"line":3,"column":359}}})) != null ? stack1 : "");
+},"4":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,((stack1 = ((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"referrer") : stack1)) != null ? lookupProperty(stack1,"referredOn") : stack1),{"name":"if","hash":{},"fn":container.program(5, data, 0),"inverse":container.program(6, data, 0),"data":data,"loc":{"start":{"line":3,"column":54},"end":{"line":3,"column":191}}})) != null ? stack1 : "")
+    + " "
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,((stack1 = ((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"patient") : stack1)) != null ? lookupProperty(stack1,"givenName") : stack1),{"name":"if","hash":{},"fn":container.program(7, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":3,"column":192},"end":{"line":3,"column":254}}})) != null ? stack1 : "")
+    + ((stack1 = container.lambda(((stack1 = ((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"patient") : stack1)) != null ? lookupProperty(stack1,"familyName") : stack1), depth0)) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"startedAt") : stack1),{"name":"if","hash":{},"fn":container.program(8, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":3,"column":280},"end":{"line":3,"column":352}}})) != null ? stack1 : "");
+},"5":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "thank you for your referral of "
+    + ((stack1 = lookupProperty(helpers,"date").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = ((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"referrer") : stack1)) != null ? lookupProperty(stack1,"referredOn") : stack1),{"name":"date","hash":{},"data":data,"loc":{"start":{"line":3,"column":116},"end":{"line":3,"column":148}}})) != null ? stack1 : "")
+    + " of";
+},"6":function(container,depth0,helpers,partials,data) {
+    return "this is to tell you about";
+},"7":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.lambda(((stack1 = ((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"patient") : stack1)) != null ? lookupProperty(stack1,"givenName") : stack1), depth0)) != null ? stack1 : "")
+    + " ";
+},"8":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ", who was operated on "
+    + ((stack1 = lookupProperty(helpers,"date").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"startedAt") : stack1),{"name":"date","hash":{},"data":data,"loc":{"start":{"line":3,"column":323},"end":{"line":3,"column":345}}})) != null ? stack1 : "");
+},"9":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.invokePartial(lookupProperty(partials,"diagnosis"),depth0,{"name":"diagnosis","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
+},"10":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.invokePartial(lookupProperty(partials,"procedure"),depth0,{"name":"procedure","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
+},"11":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"statement").call(alias1,"pressure",{"name":"statement","hash":{},"fn":container.program(12, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":12,"column":0},"end":{"line":12,"column":261}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"oil-pressure",{"name":"statement","hash":{},"fn":container.program(14, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":13,"column":0},"end":{"line":13,"column":268}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"again",{"name":"statement","hash":{},"fn":container.program(16, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":14,"column":0},"end":{"line":14,"column":173}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"glasses",{"name":"statement","hash":{},"fn":container.program(18, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":15,"column":0},"end":{"line":15,"column":189}}})) != null ? stack1 : "")
+    + "\n";
+},"12":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"any").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"SF6",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":12,"column":36},"end":{"line":12,"column":62}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"C2F6",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":12,"column":63},"end":{"line":12,"column":90}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"C3F8",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":12,"column":91},"end":{"line":12,"column":118}}}),{"name":"any","hash":{},"data":data,"loc":{"start":{"line":12,"column":31},"end":{"line":12,"column":119}}}),{"name":"if","hash":{},"fn":container.program(13, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":12,"column":25},"end":{"line":12,"column":247}}})) != null ? stack1 : "");
+},"13":function(container,depth0,helpers,partials,data) {
+    return "if you see the patient while there is gas in the eye, please measure the pressure; tell us the same day if it is raised";
+},"14":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"any").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"silicone-oil",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":13,"column":40},"end":{"line":13,"column":75}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"heavy-oil",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":13,"column":76},"end":{"line":13,"column":108}}}),{"name":"any","hash":{},"data":data,"loc":{"start":{"line":13,"column":35},"end":{"line":13,"column":109}}}),{"name":"if","hash":{},"fn":container.program(15, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":13,"column":29},"end":{"line":13,"column":254}}})) != null ? stack1 : "");
+},"15":function(container,depth0,helpers,partials,data) {
+    return "there is silicone oil in the eye: please measure the pressure at each visit and expect the refraction to be altered until the oil is out";
+},"16":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"eye") : stack1),{"name":"if","hash":{},"fn":container.program(17, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":14,"column":22},"end":{"line":14,"column":159}}})) != null ? stack1 : "");
+},"17":function(container,depth0,helpers,partials,data) {
+    return "please send the patient back the same day with new floaters, flashes, a shadow, loss of sight or pain in either eye";
+},"18":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"refractiveChangeTold") : stack1),{"name":"if","hash":{},"fn":container.program(19, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":15,"column":24},"end":{"line":15,"column":175}}})) != null ? stack1 : "");
+},"19":function(container,depth0,helpers,partials,data) {
+    return "please wait with new glasses until the eye has settled: the operation is expected to change its refraction";
+},"20":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.invokePartial(lookupProperty(partials,"posture"),depth0,{"name":"posture","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "")
+    + ((stack1 = container.invokePartial(lookupProperty(partials,"gas-advice"),depth0,{"name":"gas-advice","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "")
+    + ((stack1 = container.invokePartial(lookupProperty(partials,"courses"),depth0,{"name":"courses","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "")
+    + ((stack1 = container.invokePartial(lookupProperty(partials,"review"),depth0,{"name":"review","data":data,"helpers":helpers,"partials":partials,"decorators":container.decorators})) != null ? stack1 : "");
+},"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"section").call(alias1,"salutation","Salutation",{"name":"section","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":4,"column":12}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"diagnosis","Diagnosis",{"name":"section","hash":{},"fn":container.program(9, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":5,"column":0},"end":{"line":7,"column":12}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"procedure","Procedure",{"name":"section","hash":{},"fn":container.program(10, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":8,"column":0},"end":{"line":10,"column":12}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"actions","What we ask of you",{"name":"section","hash":{},"fn":container.program(11, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":11,"column":0},"end":{"line":16,"column":12}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"aftercare","What the patient was told",{"name":"section","hash":{},"fn":container.program(20, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":17,"column":0},"end":{"line":22,"column":12}}})) != null ? stack1 : "");
+},"usePartial":true,"useData":true},
 };
 export const partials = {
   "courses": {"0":function(container,depth0,helpers,partials,data) {
@@ -3306,6 +4259,103 @@ export const partials = {
   return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"drops") : stack1),"none",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":1,"column":6},"end":{"line":1,"column":33}}}),{"name":"if","hash":{},"fn":container.program(0, data, 0),"inverse":container.program(3, data, 0),"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":388}}})) != null ? stack1 : "")
     + "\n"
     + ((stack1 = lookupProperty(helpers,"each").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"tablets") : stack1),{"name":"each","hash":{},"fn":container.program(10, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":2,"column":0},"end":{"line":2,"column":208}}})) != null ? stack1 : "")
+    + "\n";
+},"useData":true},
+  "diagnosis": {"0":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"before") : depth0)) != null ? lookupProperty(stack1,"diagnosis") : stack1),{"name":"if","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":1,"column":26},"end":{"line":1,"column":209}}})) != null ? stack1 : "");
+},"1":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.lambda(((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"eye") : stack1), depth0)) != null ? stack1 : "")
+    + " "
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"before") : depth0)) != null ? lookupProperty(stack1,"recurrent") : stack1),{"name":"if","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":1,"column":62},"end":{"line":1,"column":103}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"label").call(alias1,"before.diagnosis",((stack1 = (depth0 != null ? lookupProperty(depth0,"before") : depth0)) != null ? lookupProperty(stack1,"diagnosis") : stack1),{"name":"label","hash":{},"data":data,"loc":{"start":{"line":1,"column":103},"end":{"line":1,"column":148}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"before") : depth0)) != null ? lookupProperty(stack1,"macula") : stack1),{"name":"if","hash":{},"fn":container.program(3, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":1,"column":148},"end":{"line":1,"column":202}}})) != null ? stack1 : "");
+},"2":function(container,depth0,helpers,partials,data) {
+    return "recurrent ";
+},"3":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ", macula "
+    + ((stack1 = container.lambda(((stack1 = (depth0 != null ? lookupProperty(depth0,"before") : depth0)) != null ? lookupProperty(stack1,"macula") : stack1), depth0)) != null ? stack1 : "");
+},"4":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"isList").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"breaks") : depth0)) != null ? lookupProperty(stack1,"found") : stack1),{"name":"isList","hash":{},"data":data,"loc":{"start":{"line":2,"column":29},"end":{"line":2,"column":50}}}),{"name":"if","hash":{},"fn":container.program(5, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":2,"column":23},"end":{"line":2,"column":115}}})) != null ? stack1 : "");
+},"5":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"counted").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"breaks") : depth0)) != null ? lookupProperty(stack1,"found") : stack1),"break was","breaks were",{"name":"counted","hash":{},"data":data,"loc":{"start":{"line":2,"column":52},"end":{"line":2,"column":102}}})) != null ? stack1 : "")
+    + " found";
+},"6":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = ((stack1 = (depth0 != null ? lookupProperty(depth0,"before") : depth0)) != null ? lookupProperty(stack1,"pvr") : stack1)) != null ? lookupProperty(stack1,"grade") : stack1),{"name":"if","hash":{},"fn":container.program(7, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":3,"column":20},"end":{"line":3,"column":194}}})) != null ? stack1 : "");
+},"7":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"isNot").call(alias1,((stack1 = ((stack1 = (depth0 != null ? lookupProperty(depth0,"before") : depth0)) != null ? lookupProperty(stack1,"pvr") : stack1)) != null ? lookupProperty(stack1,"grade") : stack1),"none",{"name":"isNot","hash":{},"data":data,"loc":{"start":{"line":3,"column":50},"end":{"line":3,"column":81}}}),{"name":"if","hash":{},"fn":container.program(8, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":3,"column":44},"end":{"line":3,"column":187}}})) != null ? stack1 : "");
+},"8":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "there was scar tissue on the retina (proliferative vitreoretinopathy, grade "
+    + ((stack1 = container.lambda(((stack1 = ((stack1 = (depth0 != null ? lookupProperty(depth0,"before") : depth0)) != null ? lookupProperty(stack1,"pvr") : stack1)) != null ? lookupProperty(stack1,"grade") : stack1), depth0)) != null ? stack1 : "")
+    + ")";
+},"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"statement").call(alias1,"diagnosis",{"name":"statement","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":223}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"breaks",{"name":"statement","hash":{},"fn":container.program(4, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":2,"column":0},"end":{"line":2,"column":129}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"pvr",{"name":"statement","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":3,"column":0},"end":{"line":3,"column":208}}})) != null ? stack1 : "")
     + "\n";
 },"useData":true},
   "gas-advice": {"0":function(container,depth0,helpers,partials,data) {
@@ -3457,6 +4507,255 @@ export const partials = {
     };
 
   return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"posture") : stack1),"none",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":1,"column":6},"end":{"line":1,"column":35}}}),{"name":"if","hash":{},"fn":container.program(0, data, 0),"inverse":container.program(3, data, 0),"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":521}}})) != null ? stack1 : "")
+    + "\n";
+},"useData":true},
+  "procedure": {"0":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"performed") : stack1),{"name":"if","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":1,"column":26},"end":{"line":1,"column":271}}})) != null ? stack1 : "");
+},"1":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.lambda(((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"eye") : stack1), depth0)) != null ? stack1 : "")
+    + " "
+    + ((stack1 = lookupProperty(helpers,"labels").call(alias1,"who.performed",((stack1 = (depth0 != null ? lookupProperty(depth0,"who") : depth0)) != null ? lookupProperty(stack1,"performed") : stack1),{"name":"labels","hash":{},"data":data,"loc":{"start":{"line":1,"column":59},"end":{"line":1,"column":99}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"anaesthesia") : depth0)) != null ? lookupProperty(stack1,"kind") : stack1),{"name":"if","hash":{},"fn":container.program(2, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":1,"column":99},"end":{"line":1,"column":264}}})) != null ? stack1 : "");
+},"2":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ", under "
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"anaesthesia") : depth0)) != null ? lookupProperty(stack1,"kind") : stack1),"general",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":1,"column":137},"end":{"line":1,"column":168}}}),{"name":"if","hash":{},"fn":container.program(3, data, 0),"inverse":container.program(4, data, 0),"data":data,"loc":{"start":{"line":1,"column":131},"end":{"line":1,"column":257}}})) != null ? stack1 : "");
+},"3":function(container,depth0,helpers,partials,data) {
+    return "general anaesthesia";
+},"4":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"lower").call(alias1,lookupProperty(helpers,"label").call(alias1,"anaesthesia.kind",((stack1 = (depth0 != null ? lookupProperty(depth0,"anaesthesia") : depth0)) != null ? lookupProperty(stack1,"kind") : stack1),{"name":"label","hash":{},"data":data,"loc":{"start":{"line":1,"column":205},"end":{"line":1,"column":248}}}),{"name":"lower","hash":{},"data":data,"loc":{"start":{"line":1,"column":197},"end":{"line":1,"column":250}}})) != null ? stack1 : "");
+},"5":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),{"name":"if","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":2,"column":26},"end":{"line":2,"column":360}}})) != null ? stack1 : "");
+},"6":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"none",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":2,"column":55},"end":{"line":2,"column":82}}}),{"name":"if","hash":{},"fn":container.program(7, data, 0),"inverse":container.program(8, data, 0),"data":data,"loc":{"start":{"line":2,"column":49},"end":{"line":2,"column":353}}})) != null ? stack1 : "");
+},"7":function(container,depth0,helpers,partials,data) {
+    return "no gas or oil was left in the eye";
+},"8":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"isNot").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"concentrationPercent") : stack1),"not-applicable",{"name":"isNot","hash":{},"data":data,"loc":{"start":{"line":2,"column":131},"end":{"line":2,"column":186}}}),{"name":"if","hash":{},"fn":container.program(9, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":2,"column":125},"end":{"line":2,"column":283}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"label").call(alias1,"tamponade.agent",((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),{"name":"label","hash":{},"data":data,"loc":{"start":{"line":2,"column":283},"end":{"line":2,"column":326}}})) != null ? stack1 : "")
+    + " was left in the eye";
+},"9":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"concentrationPercent") : stack1),{"name":"if","hash":{},"fn":container.program(10, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":2,"column":188},"end":{"line":2,"column":276}}})) != null ? stack1 : "");
+},"10":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"number").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"concentrationPercent") : stack1),{"name":"number","hash":{},"data":data,"loc":{"start":{"line":2,"column":226},"end":{"line":2,"column":267}}})) != null ? stack1 : "")
+    + "% ";
+},"11":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"endOfCase") : depth0)) != null ? lookupProperty(stack1,"retina") : stack1),{"name":"if","hash":{},"fn":container.program(12, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":3,"column":24},"end":{"line":3,"column":320}}})) != null ? stack1 : "");
+},"12":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "at the end "
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"endOfCase") : depth0)) != null ? lookupProperty(stack1,"retina") : stack1),"fluid-left",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":3,"column":65},"end":{"line":3,"column":99}}}),{"name":"if","hash":{},"fn":container.program(13, data, 0),"inverse":container.program(14, data, 0),"data":data,"loc":{"start":{"line":3,"column":59},"end":{"line":3,"column":212}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"known").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"endOfCase") : depth0)) != null ? lookupProperty(stack1,"pressureMmHg") : stack1),{"name":"known","hash":{},"data":data,"loc":{"start":{"line":3,"column":218},"end":{"line":3,"column":248}}}),{"name":"if","hash":{},"fn":container.program(15, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":3,"column":212},"end":{"line":3,"column":313}}})) != null ? stack1 : "");
+},"13":function(container,depth0,helpers,partials,data) {
+    return "some fluid was left under the retina";
+},"14":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "the retina was "
+    + ((stack1 = lookupProperty(helpers,"label").call(depth0 != null ? depth0 : (container.nullContext || {}),"endOfCase.retina",((stack1 = (depth0 != null ? lookupProperty(depth0,"endOfCase") : depth0)) != null ? lookupProperty(stack1,"retina") : stack1),{"name":"label","hash":{},"data":data,"loc":{"start":{"line":3,"column":160},"end":{"line":3,"column":205}}})) != null ? stack1 : "");
+},"15":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return " and the pressure "
+    + ((stack1 = lookupProperty(helpers,"number").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"endOfCase") : depth0)) != null ? lookupProperty(stack1,"pressureMmHg") : stack1),{"name":"number","hash":{},"data":data,"loc":{"start":{"line":3,"column":268},"end":{"line":3,"column":301}}})) != null ? stack1 : "")
+    + " mmHg";
+},"16":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"statement").call(depth0 != null ? depth0 : (container.nullContext || {}),"no-complication",{"name":"statement","hash":{},"fn":container.program(17, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":4,"column":43},"end":{"line":4,"column":166}}})) != null ? stack1 : "");
+},"17":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"endOfCase") : depth0)) != null ? lookupProperty(stack1,"complications") : stack1),"none",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":4,"column":81},"end":{"line":4,"column":116}}}),{"name":"if","hash":{},"fn":container.program(18, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":4,"column":75},"end":{"line":4,"column":152}}})) != null ? stack1 : "");
+},"18":function(container,depth0,helpers,partials,data) {
+    return "there were no complications";
+},"19":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"endOfCase") : depth0)) != null ? lookupProperty(stack1,"complications") : stack1),{"name":"each","hash":{},"fn":container.program(20, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":4,"column":174},"end":{"line":4,"column":473}}})) != null ? stack1 : "");
+},"20":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"statement").call(depth0 != null ? depth0 : (container.nullContext || {}),"complication",(data && lookupProperty(data,"index")),{"name":"statement","hash":{},"fn":container.program(21, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":4,"column":207},"end":{"line":4,"column":464}}})) != null ? stack1 : "");
+},"21":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"any").call(alias1,(depth0 != null ? lookupProperty(depth0,"kind") : depth0),(depth0 != null ? lookupProperty(depth0,"detail") : depth0),{"name":"any","hash":{},"data":data,"loc":{"start":{"line":4,"column":249},"end":{"line":4,"column":266}}}),{"name":"if","hash":{},"fn":container.program(22, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":4,"column":243},"end":{"line":4,"column":450}}})) != null ? stack1 : "");
+},"22":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "complication: "
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,(depth0 != null ? lookupProperty(depth0,"kind") : depth0),"other",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":4,"column":288},"end":{"line":4,"column":305}}}),{"name":"if","hash":{},"fn":container.program(23, data, 0),"inverse":container.program(24, data, 0),"data":data,"loc":{"start":{"line":4,"column":282},"end":{"line":4,"column":410}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,(depth0 != null ? lookupProperty(depth0,"action") : depth0),{"name":"if","hash":{},"fn":container.program(26, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":4,"column":410},"end":{"line":4,"column":443}}})) != null ? stack1 : "");
+},"23":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.lambda((depth0 != null ? lookupProperty(depth0,"detail") : depth0), depth0)) != null ? stack1 : "");
+},"24":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"label").call(alias1,"endOfCase.complications.kind",(depth0 != null ? lookupProperty(depth0,"kind") : depth0),{"name":"label","hash":{},"data":data,"loc":{"start":{"line":4,"column":325},"end":{"line":4,"column":370}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,(depth0 != null ? lookupProperty(depth0,"detail") : depth0),{"name":"if","hash":{},"fn":container.program(25, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":4,"column":370},"end":{"line":4,"column":403}}})) != null ? stack1 : "");
+},"25":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ", "
+    + ((stack1 = container.lambda((depth0 != null ? lookupProperty(depth0,"detail") : depth0), depth0)) != null ? stack1 : "");
+},"26":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "; "
+    + ((stack1 = container.lambda((depth0 != null ? lookupProperty(depth0,"action") : depth0), depth0)) != null ? stack1 : "");
+},"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"statement").call(alias1,"procedure",{"name":"statement","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":1,"column":285}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"tamponade",{"name":"statement","hash":{},"fn":container.program(5, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":2,"column":0},"end":{"line":2,"column":374}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"outcome",{"name":"statement","hash":{},"fn":container.program(11, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":3,"column":0},"end":{"line":3,"column":334}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"endOfCase") : depth0)) != null ? lookupProperty(stack1,"complications") : stack1),"none",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":4,"column":6},"end":{"line":4,"column":41}}}),{"name":"if","hash":{},"fn":container.program(16, data, 0),"inverse":container.program(19, data, 0),"data":data,"loc":{"start":{"line":4,"column":0},"end":{"line":4,"column":480}}})) != null ? stack1 : "")
     + "\n";
 },"useData":true},
   "review": {"0":function(container,depth0,helpers,partials,data) {

@@ -94,5 +94,6 @@ export const tidy = (text: string): string => {
     .trim();
   if (words === '' || /^[.,;:]+$/.test(words)) return '';
   const sentence = words.charAt(0).toUpperCase() + words.slice(1);
-  return /[.!?]$/.test(sentence) ? sentence : `${sentence.replace(/[,;:]$/, '')}.`;
+  if (/^Dear .*,$/.test(sentence) || /[.!?]$/.test(sentence)) return sentence;
+  return `${sentence.replace(/[,;:]$/, '')}.`;
 };
