@@ -144,9 +144,9 @@ const line = (cells: readonly (string | number)[]) => cells.map(String).join('\t
 /** The bench as text, the worst first. */
 export const printBench = (bench: CheckerBench): string => {
   const applied = bench.faults.filter((fault) => fault.applied > 0);
-  const complete = applied.filter((fault) => fault.found === fault.applied);
+  const complete = applied.filter((fault) => fault.found + fault.elsewhere === fault.applied);
   const trials = applied.reduce((sum, fault) => sum + fault.applied, 0);
-  const hits = applied.reduce((sum, fault) => sum + fault.found, 0);
+  const hits = applied.reduce((sum, fault) => sum + fault.found + fault.elsewhere, 0);
   const short = applied
     .filter((fault) => fault.found < fault.applied)
     .sort((a, b) => a.found / a.applied - b.found / b.applied);

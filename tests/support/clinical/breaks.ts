@@ -112,6 +112,8 @@ const moreClocks = (where: Where, first: number): number[] => {
   for (let wanted = moreBreaks(where), attempt = 0; wanted > 0 && attempt < 80; attempt += 1) {
     const clock = wrap(first + random.stepped(-reach, reach, 0.25));
     if (clocks.some((taken) => apart(taken, clock) < 0.75)) continue;
+    // Out of reach of a bubble.
+    if (scenario.name === 'pneumatic retinopexy' && clock > 4 && clock < 8) continue;
     const border = [detachment.from, detachment.to].some((at) => at !== undefined && apart(at, clock) < 0.5);
     const outside = !isDetachedAt(detachment, clock);
     if (border || (outside && (scenario.name === 'pneumatic retinopexy' || random.chance(0.6)))) continue;

@@ -1,7 +1,7 @@
 import type { Eye } from '../../../src/domain/record/schema.ts';
 import { planBreaks } from './breaks.ts';
 import { planDetachment, primaryClock } from './detachment.ts';
-import type { Band, Plan } from './planned.ts';
+import type { Band, Plan, PlannedBreak } from './planned.ts';
 import { type Random, randomFrom, round } from './random.ts';
 import type { Scenario } from './scenario.ts';
 import { scenarios } from './scenarios.ts';
@@ -62,9 +62,12 @@ const planBand = (random: Random, axialLengthMm: number, age: number): Band => {
   };
 };
 
-/** Expanding gas beside a buckle is for breaks above. */
-const agentFor = (random: Random, scenario: Scenario, clock: number) => {
+/** Expanding gas beside a buckle is for breaks above, heavy oil for breaks below. */
+const agentFor = (random: Random, scenario: Scenario, breaks: readonly PlannedBreak[]) => {
   const agent = random.weighted(scenario.agents);
+  const clock = breaks[0]?.clock ?? 12;
+  const low = breaks.every((found) => found.clock !== undefined && found.clock > 3 && found.clock < 9);
+  if (agent === 'heavy-oil' && !low) return 'silicone-oil';
   const below = clock > 3.25 && clock < 8.75;
   return agent === 'SF6' && !scenario.vitrectomy && scenario.buckle !== 'none' && below ? 'none' : agent;
 };
@@ -89,6 +92,7 @@ export const planFrom = (start: number): Plan => {
   const detachment = planDetachment(random, scenario, clock, eye);
   const pvd = posteriorVitreous(random, scenario, age, redo);
   const where = { random, attached: pvd === 'none', scenario, eye, axialLengthMm, detachment, band };
+  const breaks = planBreaks(where, clock);
   const heavyLiquidStays = ['giant-tear', 'pvr'].includes(scenario.disease) && random.chance(0.07);
   return {
     random,
@@ -107,9 +111,9 @@ export const planFrom = (start: number): Plan => {
     bandFromBefore: redo && band === undefined && random.chance(0.3),
     pvd,
     detachment,
-    breaks: planBreaks(where, clock),
+    breaks,
     band,
-    agent: heavyLiquidStays ? 'none' : agentFor(random, scenario, clock),
+    agent: heavyLiquidStays ? 'none' : agentFor(random, scenario, breaks),
     heavyLiquidStays,
     general: age < 18 || random.chance(scenario.name === 'pneumatic retinopexy' ? 0 : 0.35),
   };

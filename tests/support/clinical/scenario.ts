@@ -54,6 +54,6 @@ export const gases: Weighted<TamponadeAgent> = [
 ];
 export const oils: Weighted<TamponadeAgent> = [
   [5, 'silicone-oil'],
-  [1, 'heavy-oil'],
+  [3, 'heavy-oil'],
   [2, 'C3F8'],
 ];

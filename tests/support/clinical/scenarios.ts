@@ -127,7 +127,7 @@ export const scenarios: Weighted<Scenario> = [
       disease: 'tears',
       agents: [
         [5, 'silicone-oil'],
-        [2, 'heavy-oil'],
+        [5, 'heavy-oil'],
       ],
       ages: [40, 85],
       lenses: older,

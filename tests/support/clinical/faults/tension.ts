@@ -12,7 +12,10 @@ export const tensionFaults = [
   tension.inItem(
     ['higher-than-the-shortening-allows', 'contradiction', 'Higher than that shortening can make it'],
     'buckle.elements',
-    (e) => (e.role === 'encircling' && (e.shortenedMm ?? 99) <= 8 ? { heightMm: 4 } : null),
+    (e, r) =>
+      e.role === 'encircling' && r.buckle?.elements?.length === 1 && (e.shortenedMm ?? 99) <= 8
+        ? { heightMm: 4 }
+        : null,
   ),
   tension.inItem(
     ['shortening-without-its-point', 'contradiction', 'Shortening ten times too large'],
