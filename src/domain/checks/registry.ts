@@ -1,23 +1,32 @@
 import type { Rule } from './define-rule.ts';
 import { rule as absorbableFixation } from './rules/absorbable-fixation/rule.ts';
+import { rule as agentExchangeMismatch } from './rules/agent-exchange-mismatch/rule.ts';
 import { rule as allergyAgainstMedicine } from './rules/allergy-against-medicine/rule.ts';
+import { rule as anaesthetistMissing } from './rules/anaesthetist-missing/rule.ts';
 import { rule as axialLengthFromBeforeBand } from './rules/axial-length-from-before-band/rule.ts';
 import { rule as bandDoesNotFitGlobe } from './rules/band-does-not-fit-globe/rule.ts';
+import { rule as bandFarFromUsualPlace } from './rules/band-far-from-usual-place/rule.ts';
 import { rule as bandFixedInFewQuadrants } from './rules/band-fixed-in-few-quadrants/rule.ts';
 import { rule as bandMayBeTwisted } from './rules/band-may-be-twisted/rule.ts';
 import { rule as bandWithoutClosure } from './rules/band-without-closure/rule.ts';
 import { rule as biteNarrowerThanElement } from './rules/bite-narrower-than-element/rule.ts';
+import { rule as bleedingRiskExternalDrainage } from './rules/bleeding-risk-external-drainage/rule.ts';
+import { rule as blockAgainstAnaesthesia } from './rules/block-against-anaesthesia/rule.ts';
+import { rule as blockEyeMissing } from './rules/block-eye-missing/rule.ts';
 import { rule as bornAfterSurgery } from './rules/born-after-surgery/rule.ts';
 import { rule as breakEdgesCrossed } from './rules/break-edges-crossed/rule.ts';
 import { rule as breakOffItsZone } from './rules/break-off-its-zone/rule.ts';
 import { rule as breakUnsupported } from './rules/break-unsupported/rule.ts';
 import { rule as breakWithoutRetinopexy } from './rules/break-without-retinopexy/rule.ts';
+import { rule as broadElementInOlderPatient } from './rules/broad-element-in-older-patient/rule.ts';
+import { rule as buckleWithoutOpening } from './rules/buckle-without-opening/rule.ts';
 import { rule as cephalosporinAfterPenicillinAllergy } from './rules/cephalosporin-after-penicillin-allergy/rule.ts';
 import { rule as clockOutsideQuadrant } from './rules/clock-outside-quadrant/rule.ts';
 import { rule as complicationWithoutAction } from './rules/complication-without-action/rule.ts';
 import { rule as complicationsAgainstOutcome } from './rules/complications-against-outcome/rule.ts';
 import { rule as countDiscrepancyOpen } from './rules/count-discrepancy-open/rule.ts';
 import { rule as dateOutOfOrder } from './rules/date-out-of-order/rule.ts';
+import { rule as detachmentSurgeryRepeated } from './rules/detachment-surgery-repeated/rule.ts';
 import { rule as detachmentWithoutDetachment } from './rules/detachment-without-detachment/rule.ts';
 import { rule as diagnosisAgainstBreaks } from './rules/diagnosis-against-breaks/rule.ts';
 import { rule as dilutionWrong } from './rules/dilution-wrong/rule.ts';
@@ -26,6 +35,7 @@ import { rule as drainageDetailsWithoutDrainage } from './rules/drainage-details
 import { rule as drainageRetinotomyMissing } from './rules/drainage-retinotomy-missing/rule.ts';
 import { rule as drainageWithoutOutcome } from './rules/drainage-without-outcome/rule.ts';
 import { rule as dropWithoutDose } from './rules/drop-without-dose/rule.ts';
+import { rule as elementOfImpossibleSize } from './rules/element-of-impossible-size/rule.ts';
 import { rule as elementWithoutFixation } from './rules/element-without-fixation/rule.ts';
 import { rule as elementWithoutFrontEdge } from './rules/element-without-front-edge/rule.ts';
 import { rule as elementWithoutSize } from './rules/element-without-size/rule.ts';
@@ -37,41 +47,59 @@ import { rule as fixedDateForFlying } from './rules/fixed-date-for-flying/rule.t
 import { rule as fluidAgainstFlat } from './rules/fluid-against-flat/rule.ts';
 import { rule as flyingBeforeGasGone } from './rules/flying-before-gas-gone/rule.ts';
 import { rule as followUpBeforeSurgery } from './rules/follow-up-before-surgery/rule.ts';
+import { rule as formAgainstMaterial } from './rules/form-against-material/rule.ts';
 import { rule as gasAdviceMissing } from './rules/gas-advice-missing/rule.ts';
 import { rule as gasAdviceNotGiven } from './rules/gas-advice-not-given/rule.ts';
+import { rule as gasAdviceWithoutGas } from './rules/gas-advice-without-gas/rule.ts';
 import { rule as gasConcentrationMissing } from './rules/gas-concentration-missing/rule.ts';
 import { rule as gasWithoutPosture } from './rules/gas-without-posture/rule.ts';
 import { rule as giantTearTooSmall } from './rules/giant-tear-too-small/rule.ts';
 import { rule as giantTearWithoutPvd } from './rules/giant-tear-without-pvd/rule.ts';
 import { rule as heavyLiquidLeft } from './rules/heavy-liquid-left/rule.ts';
 import { rule as heavyLiquidUseNotRecorded } from './rules/heavy-liquid-use-not-recorded/rule.ts';
+import { rule as heavyOilFaceDown } from './rules/heavy-oil-face-down/rule.ts';
 import { rule as heightAboveBound } from './rules/height-above-bound/rule.ts';
 import { rule as horseshoeWithVitreousAttached } from './rules/horseshoe-with-vitreous-attached/rule.ts';
+import { rule as hyaloidAgainstBefore } from './rules/hyaloid-against-before/rule.ts';
+import { rule as implantPowerMissing } from './rules/implant-power-missing/rule.ts';
 import { rule as implantWithoutLot } from './rules/implant-without-lot/rule.ts';
 import { rule as internalDrainageWithoutVitrectomy } from './rules/internal-drainage-without-vitrectomy/rule.ts';
+import { rule as largeFillVolumeMismatch } from './rules/large-fill-volume-mismatch/rule.ts';
 import { rule as lastingClosureTemporaryBand } from './rules/lasting-closure-temporary-band/rule.ts';
+import { rule as lateReview } from './rules/late-review/rule.ts';
+import { rule as lensBeforeAgainstHistory } from './rules/lens-before-against-history/rule.ts';
+import { rule as lensImplantInPhakicEye } from './rules/lens-implant-in-phakic-eye/rule.ts';
+import { rule as lensWorkAgainstLens } from './rules/lens-work-against-lens/rule.ts';
 import { rule as lincoffRule } from './rules/lincoff-rule/rule.ts';
+import { rule as lowerBreaksLightTamponadeUpright } from './rules/lower-breaks-light-tamponade-upright/rule.ts';
 import { rule as maculaOffBeforeSymptoms } from './rules/macula-off-before-symptoms/rule.ts';
 import { rule as maculaOnForDaysOff } from './rules/macula-on-for-days-off/rule.ts';
 import { rule as measuredBloodLossMissing } from './rules/measured-blood-loss-missing/rule.ts';
+import { rule as medicineGivenOutsideOperation } from './rules/medicine-given-outside-operation/rule.ts';
+import { rule as musclesAgainstBand } from './rules/muscles-against-band/rule.ts';
 import { rule as nitrousOxideAndGas } from './rules/nitrous-oxide-and-gas/rule.ts';
 import { rule as nitrousOxideToTheEnd } from './rules/nitrous-oxide-to-the-end/rule.ts';
 import { rule as oilInAphakicEye } from './rules/oil-in-aphakic-eye/rule.ts';
 import { rule as oilWithoutRemovalPlan } from './rules/oil-without-removal-plan/rule.ts';
 import { rule as oilWithoutViscosity } from './rules/oil-without-viscosity/rule.ts';
+import { rule as onePersonInTwoRoles } from './rules/one-person-in-two-roles/rule.ts';
 import { rule as performedAgainstStages } from './rules/performed-against-stages/rule.ts';
 import { rule as perfusionNotRecorded } from './rules/perfusion-not-recorded/rule.ts';
 import { rule as planChangedWithoutReason } from './rules/plan-changed-without-reason/rule.ts';
 import { rule as pneumaticBreaksOutOfReach } from './rules/pneumatic-breaks-out-of-reach/rule.ts';
 import { rule as pneumaticVolume } from './rules/pneumatic-volume/rule.ts';
 import { rule as pneumaticWithVitrectomy } from './rules/pneumatic-with-vitrectomy/rule.ts';
+import { rule as postureHoursDoNotAddUp } from './rules/posture-hours-do-not-add-up/rule.ts';
 import { rule as postureLeavesBreakDry } from './rules/posture-leaves-break-dry/rule.ts';
 import { rule as postureOnWrongSide } from './rules/posture-on-wrong-side/rule.ts';
 import { rule as postureWithoutDuration } from './rules/posture-without-duration/rule.ts';
+import { rule as preoperativeDiagnosisNotBorneOut } from './rules/preoperative-diagnosis-not-borne-out/rule.ts';
 import { rule as pressureAtEnd } from './rules/pressure-at-end/rule.ts';
 import { rule as pureGasAtFullFill } from './rules/pure-gas-at-full-fill/rule.ts';
 import { rule as pvrExtentMissing } from './rules/pvr-extent-missing/rule.ts';
 import { rule as pvrGradeOfOtherEdition } from './rules/pvr-grade-of-other-edition/rule.ts';
+import { rule as referrerMissing } from './rules/referrer-missing/rule.ts';
+import { rule as refractionNotTold } from './rules/refraction-not-told/rule.ts';
 import { rule as requiredAftercare } from './rules/required-aftercare/rule.ts';
 import { rule as requiredAnaesthesia } from './rules/required-anaesthesia/rule.ts';
 import { rule as requiredBefore } from './rules/required-before/rule.ts';
@@ -81,19 +109,26 @@ import { rule as requiredSteps } from './rules/required-steps/rule.ts';
 import { rule as requiredWho } from './rules/required-who/rule.ts';
 import { rule as retinopexyKindsDiffer } from './rules/retinopexy-kinds-differ/rule.ts';
 import { rule as retinopexyOfMissingBreak } from './rules/retinopexy-of-missing-break/rule.ts';
+import { rule as retinotomyUntreated } from './rules/retinotomy-untreated/rule.ts';
 import { rule as reviewDatesDiffer } from './rules/review-dates-differ/rule.ts';
+import { rule as sclerotomiesOffParsPlana } from './rules/sclerotomies-off-pars-plana/rule.ts';
 import { rule as segmentOverHalf } from './rules/segment-over-half/rule.ts';
 import { rule as shortenedTooMuch } from './rules/shortened-too-much/rule.ts';
 import { rule as sideDiffers } from './rules/side-differs/rule.ts';
+import { rule as smallHyperopicEye } from './rules/small-hyperopic-eye/rule.ts';
+import { rule as steroidAndAntibioticMissing } from './rules/steroid-and-antibiotic-missing/rule.ts';
+import { rule as supervisorForTrainee } from './rules/supervisor-for-trainee/rule.ts';
 import { rule as supportMissesBreak } from './rules/support-misses-break/rule.ts';
 import { rule as supportNotRecorded } from './rules/support-not-recorded/rule.ts';
 import { rule as supportedByMissingElement } from './rules/supported-by-missing-element/rule.ts';
 import { rule as tamponadeDetailsWithoutAgent } from './rules/tamponade-details-without-agent/rule.ts';
 import { rule as temporaryClosurePermanentBand } from './rules/temporary-closure-permanent-band/rule.ts';
+import { rule as tensionAboveClosingPressure } from './rules/tension-above-closing-pressure/rule.ts';
 import { rule as tightenedWithoutPressure } from './rules/tightened-without-pressure/rule.ts';
 import { rule as timeOutAfterStart } from './rules/time-out-after-start/rule.ts';
 import { rule as totalDetachmentMaculaOn } from './rules/total-detachment-macula-on/rule.ts';
 import { rule as treatmentForOtherEye } from './rules/treatment-for-other-eye/rule.ts';
+import { rule as vitrectomyDetailsWithoutVitrectomy } from './rules/vitrectomy-details-without-vitrectomy/rule.ts';
 
 /** Changes whenever a rule comes, goes or asks something else; kept with every signature. */
 export const RULES_VERSION = '2026-12-01';
@@ -101,24 +136,33 @@ export const RULES_VERSION = '2026-12-01';
 /** Every rule, by id. A test holds this list against the folders. */
 export const rules: readonly Rule[] = [
   absorbableFixation,
+  agentExchangeMismatch,
   allergyAgainstMedicine,
+  anaesthetistMissing,
   axialLengthFromBeforeBand,
   bandDoesNotFitGlobe,
+  bandFarFromUsualPlace,
   bandFixedInFewQuadrants,
   bandMayBeTwisted,
   bandWithoutClosure,
   biteNarrowerThanElement,
+  bleedingRiskExternalDrainage,
+  blockAgainstAnaesthesia,
+  blockEyeMissing,
   bornAfterSurgery,
   breakEdgesCrossed,
   breakOffItsZone,
   breakUnsupported,
   breakWithoutRetinopexy,
+  broadElementInOlderPatient,
+  buckleWithoutOpening,
   cephalosporinAfterPenicillinAllergy,
   clockOutsideQuadrant,
   complicationWithoutAction,
   complicationsAgainstOutcome,
   countDiscrepancyOpen,
   dateOutOfOrder,
+  detachmentSurgeryRepeated,
   detachmentWithoutDetachment,
   diagnosisAgainstBreaks,
   dilutionWrong,
@@ -127,6 +171,7 @@ export const rules: readonly Rule[] = [
   drainageRetinotomyMissing,
   drainageWithoutOutcome,
   dropWithoutDose,
+  elementOfImpossibleSize,
   elementWithoutFixation,
   elementWithoutFrontEdge,
   elementWithoutSize,
@@ -138,41 +183,59 @@ export const rules: readonly Rule[] = [
   fluidAgainstFlat,
   flyingBeforeGasGone,
   followUpBeforeSurgery,
+  formAgainstMaterial,
   gasAdviceMissing,
   gasAdviceNotGiven,
+  gasAdviceWithoutGas,
   gasConcentrationMissing,
   gasWithoutPosture,
   giantTearTooSmall,
   giantTearWithoutPvd,
   heavyLiquidLeft,
   heavyLiquidUseNotRecorded,
+  heavyOilFaceDown,
   heightAboveBound,
   horseshoeWithVitreousAttached,
+  hyaloidAgainstBefore,
+  implantPowerMissing,
   implantWithoutLot,
   internalDrainageWithoutVitrectomy,
+  largeFillVolumeMismatch,
   lastingClosureTemporaryBand,
+  lateReview,
+  lensBeforeAgainstHistory,
+  lensImplantInPhakicEye,
+  lensWorkAgainstLens,
   lincoffRule,
+  lowerBreaksLightTamponadeUpright,
   maculaOffBeforeSymptoms,
   maculaOnForDaysOff,
   measuredBloodLossMissing,
+  medicineGivenOutsideOperation,
+  musclesAgainstBand,
   nitrousOxideAndGas,
   nitrousOxideToTheEnd,
   oilInAphakicEye,
   oilWithoutRemovalPlan,
   oilWithoutViscosity,
+  onePersonInTwoRoles,
   performedAgainstStages,
   perfusionNotRecorded,
   planChangedWithoutReason,
   pneumaticBreaksOutOfReach,
   pneumaticVolume,
   pneumaticWithVitrectomy,
+  postureHoursDoNotAddUp,
   postureLeavesBreakDry,
   postureOnWrongSide,
   postureWithoutDuration,
+  preoperativeDiagnosisNotBorneOut,
   pressureAtEnd,
   pureGasAtFullFill,
   pvrExtentMissing,
   pvrGradeOfOtherEdition,
+  referrerMissing,
+  refractionNotTold,
   requiredAftercare,
   requiredAnaesthesia,
   requiredBefore,
@@ -182,17 +245,24 @@ export const rules: readonly Rule[] = [
   requiredWho,
   retinopexyKindsDiffer,
   retinopexyOfMissingBreak,
+  retinotomyUntreated,
   reviewDatesDiffer,
+  sclerotomiesOffParsPlana,
   segmentOverHalf,
   shortenedTooMuch,
   sideDiffers,
+  smallHyperopicEye,
+  steroidAndAntibioticMissing,
+  supervisorForTrainee,
   supportMissesBreak,
   supportNotRecorded,
   supportedByMissingElement,
   tamponadeDetailsWithoutAgent,
   temporaryClosurePermanentBand,
+  tensionAboveClosingPressure,
   tightenedWithoutPressure,
   timeOutAfterStart,
   totalDetachmentMaculaOn,
   treatmentForOtherEye,
+  vitrectomyDetailsWithoutVitrectomy,
 ];

@@ -60,6 +60,9 @@ describe.each(rules)('$id', (rule) => {
   });
 });
 
+/** What states an exception: without it the general case holds again, and may be contradicted. */
+const exceptions = /frontEdgeByQuadrantMm|imbricatedOver/;
+
 const leavesOf = (value: unknown, path: string): string[] => {
   if (Array.isArray(value) && value.every((one) => typeof one !== 'object')) return [path];
   if (typeof value !== 'object' || value === null) return [path];
@@ -84,7 +87,7 @@ describe('checkRecord', () => {
   it('never finds a contradiction in what is missing', () => {
     fc.assert(
       fc.property(anyRecord, fc.nat(), (record, at) => {
-        const leaves = leavesOf(record, '').filter((path) => path !== 'version');
+        const leaves = leavesOf(record, '').filter((path) => path !== 'version' && !exceptions.test(path));
         const leaf = leaves[at % Math.max(1, leaves.length)];
         if (leaf === undefined) return;
         const contradictions = (of: CaseRecord) =>

@@ -14,20 +14,23 @@ export const rule = defineRule({
   answerable: false,
   check: (record) =>
     elementsOf(record).flatMap((element, index) => {
-      const { lengthMm, shortenedMm = 0, frontEdgeMm, frontEdgeReference, widthMm = 2.5 } = element;
+      const { lengthMm, shortenedMm, frontEdgeMm, frontEdgeReference } = element;
+      const axialLengthMm = record.before?.axialLengthMm;
       if (
         !isEncircling(element) ||
         lengthMm === undefined ||
         frontEdgeMm === undefined ||
-        frontEdgeReference === undefined
+        frontEdgeReference === undefined ||
+        shortenedMm === undefined ||
+        axialLengthMm === undefined
       )
         return [];
       const eye = record.who?.eye ?? 'right';
-      const globe = globeOf(record.before?.axialLengthMm);
+      const globe = globeOf(axialLengthMm);
       const middle = (clock: number) =>
-        (frontEdgeReference === 'insertions' ? insertionMm(clock, eye) : 0) + frontEdgeMm + widthMm / 2;
+        (frontEdgeReference === 'insertions' ? insertionMm(clock, eye) : 0) + frontEdgeMm;
       const round = curveLengthMm(globe, middle, { from: 6, to: 6 });
-      // Axial length and course are estimates: only what misses by more than a tenth is impossible.
+      // The front edge is the shortest way round. Axial length and course are estimates: only what misses by more than a tenth is impossible.
       if (lengthMm >= (round - shortenedMm) * 0.88) return [];
       const message = `The band is ${numberWords(lengthMm)} mm long; round the eye at its place it is about ${Math.round(round)} mm (an estimate), less ${numberWords(shortenedMm)} mm of shortening.`;
       return [
@@ -40,9 +43,16 @@ export const rule = defineRule({
         name: '40 mm',
         fields: 'buckle.elements.0.lengthMm',
         record: {
+          before: { axialLengthMm: 24 },
           buckle: {
             elements: [
-              { role: 'encircling', lengthMm: 40, frontEdgeMm: 3, frontEdgeReference: 'insertions' },
+              {
+                role: 'encircling',
+                lengthMm: 40,
+                frontEdgeMm: 3,
+                frontEdgeReference: 'insertions',
+                shortenedMm: 0,
+              },
             ],
           },
         },
@@ -52,6 +62,7 @@ export const rule = defineRule({
       {
         name: '72 mm',
         record: {
+          before: { axialLengthMm: 24 },
           buckle: {
             elements: [
               {

@@ -1,4 +1,4 @@
-import { equatorMm, globeOf } from '../../../anatomy/globe.ts';
+import { equatorMm, globeOf, poleMm } from '../../../anatomy/globe.ts';
 import { defineRule } from '../../define-rule.ts';
 import { breaksOf, labelOf, numberWords } from '../../facts.ts';
 
@@ -14,11 +14,12 @@ export const rule = defineRule({
   },
   answerable: false,
   check: (record) => {
-    const globe = globeOf(record.before?.axialLengthMm);
-    const equator = equatorMm(globe);
+    const axialLengthMm = record.before?.axialLengthMm;
+    if (axialLengthMm === undefined) return [];
+    const equator = equatorMm(globeOf(axialLengthMm));
     return breaksOf(record).flatMap(({ zone, frontEdgeMm, backEdgeMm }, index) => {
       if (zone === undefined || frontEdgeMm === undefined) return [];
-      const back = backEdgeMm ?? frontEdgeMm;
+      const back = backEdgeMm ?? poleMm(globeOf(axialLengthMm));
       const wrong =
         (zone === 'ora' && frontEdgeMm > 11) ||
         (zone === 'pre-equatorial' && frontEdgeMm > equator + 1) ||
@@ -35,13 +36,16 @@ export const rule = defineRule({
       {
         name: 'at the ora, 16 mm back',
         fields: 'breaks.found.0.zone',
-        record: { breaks: { found: [{ zone: 'ora', frontEdgeMm: 16 }] } },
+        record: { before: { axialLengthMm: 24 }, breaks: { found: [{ zone: 'ora', frontEdgeMm: 16 }] } },
       },
     ],
     silent: [
       {
         name: 'equatorial',
-        record: { breaks: { found: [{ zone: 'equator', frontEdgeMm: 12, backEdgeMm: 13.5 }] } },
+        record: {
+          before: { axialLengthMm: 24 },
+          breaks: { found: [{ zone: 'equator', frontEdgeMm: 12, backEdgeMm: 13.5 }] },
+        },
       },
     ],
     unknown: [{ name: 'not measured', record: { breaks: { found: [{ zone: 'ora' }] } } }],

@@ -13,9 +13,9 @@ export const rule = defineRule({
   check: (record) => {
     const eye = record.who?.eye;
     if (eye === undefined) return [];
-    return breaksOf(record).flatMap(({ clock, quadrant, extentClockHours = 0 }, index) => {
+    return breaksOf(record).flatMap(({ clock, quadrant }, index) => {
       if (clock === undefined || quadrant === undefined) return [];
-      if (mayLieIn(quadrant, clock, extentClockHours / 2 + 0.25, eye)) return [];
+      if (mayLieIn(quadrant, clock, 0.5, eye)) return [];
       const message = `Break ${index + 1} lies at ${showClock(clock)}, which is ${quadrantAt(clock, eye)} in the ${eye} eye, and is recorded as ${quadrant}.`;
       return [
         { fields: [`breaks.found.${index}.quadrant`, `breaks.found.${index}.clock`, 'who.eye'], message },

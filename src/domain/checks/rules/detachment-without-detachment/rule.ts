@@ -8,13 +8,8 @@ export const rule = defineRule({
   why: 'With and without detachment are different operations and different codes.',
   source: { text: 'ICD-10-CM H33.0 against H33.3', certainty: 'R' },
   answerable: false,
-  check: ({ before, endOfCase }) => {
+  check: ({ before }) => {
     if (before?.diagnosis !== 'break-without-detachment') return [];
-    if (
-      endOfCase?.postoperativeDiagnosis !== undefined &&
-      endOfCase.postoperativeDiagnosis !== before.diagnosis
-    )
-      return [];
     const extent =
       before.totalDetachment === true ||
       (before.detachmentFromClock !== undefined && before.detachmentToClock !== undefined) ||

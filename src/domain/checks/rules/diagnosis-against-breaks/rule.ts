@@ -10,11 +10,8 @@ export const rule = defineRule({
   source: { text: 'ICD-10-CM H33.0: break, giant tear and dialysis are told apart', certainty: 'R' },
   answerable: false,
   check: (record) => {
-    const diagnosis = record.endOfCase?.postoperativeDiagnosis ?? record.before?.diagnosis;
-    const field =
-      record.endOfCase?.postoperativeDiagnosis === undefined
-        ? 'before.diagnosis'
-        : 'endOfCase.postoperativeDiagnosis';
+    const diagnosis = record.endOfCase?.postoperativeDiagnosis;
+    const field = 'endOfCase.postoperativeDiagnosis';
     const found = record.breaks?.found;
     if (diagnosis === undefined || found === undefined) return [];
     const kinds = found === 'none' ? [] : found.map(({ kind }) => kind);
@@ -47,29 +44,38 @@ export const rule = defineRule({
     fires: [
       {
         name: 'giant tear not found',
-        fields: 'before.diagnosis',
-        record: { before: { diagnosis: 'giant-tear' }, breaks: { found: [{ kind: 'horseshoe' }] } },
+        fields: 'endOfCase.postoperativeDiagnosis',
+        record: {
+          endOfCase: { postoperativeDiagnosis: 'giant-tear' },
+          breaks: { found: [{ kind: 'horseshoe' }] },
+        },
       },
       {
         name: 'dialysis found',
-        fields: 'before.diagnosis',
-        record: { before: { diagnosis: 'rhegmatogenous' }, breaks: { found: [{ kind: 'dialysis' }] } },
+        fields: 'endOfCase.postoperativeDiagnosis',
+        record: {
+          endOfCase: { postoperativeDiagnosis: 'rhegmatogenous' },
+          breaks: { found: [{ kind: 'dialysis' }] },
+        },
       },
     ],
     silent: [
       {
         name: 'horseshoe tear',
-        record: { before: { diagnosis: 'rhegmatogenous' }, breaks: { found: [{ kind: 'horseshoe' }] } },
+        record: {
+          endOfCase: { postoperativeDiagnosis: 'rhegmatogenous' },
+          breaks: { found: [{ kind: 'horseshoe' }] },
+        },
       },
       {
         name: 'no break found in a detachment',
-        record: { before: { diagnosis: 'rhegmatogenous' }, breaks: { found: 'none' } },
+        record: { endOfCase: { postoperativeDiagnosis: 'rhegmatogenous' }, breaks: { found: 'none' } },
       },
     ],
     unknown: [
       {
         name: 'kind not recorded',
-        record: { before: { diagnosis: 'dialysis' }, breaks: { found: [{ clock: 4 }] } },
+        record: { endOfCase: { postoperativeDiagnosis: 'dialysis' }, breaks: { found: [{ clock: 4 }] } },
       },
     ],
   },

@@ -25,8 +25,7 @@ export const rule = defineRule({
         },
       ];
     }
-    if (from === undefined || to === undefined || quadrants === undefined || totalDetachment === true)
-      return [];
+    if (from === undefined || to === undefined || quadrants === undefined) return [];
     const hours = arcHours({ from, to });
     const most = Math.min(4, Math.floor((hours + 0.5) / 3) + 2);
     if (quadrants <= most && quadrants * 3 >= hours - 0.5) return [];

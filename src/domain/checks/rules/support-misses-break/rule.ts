@@ -22,7 +22,8 @@ export const rule = defineRule({
     const elements = elementsOf(record);
     return breaksOf(record).flatMap((found, index) => {
       const { supportedByElements, clock } = found;
-      if (!Array.isArray(supportedByElements) || clock === undefined) return [];
+      if (!Array.isArray(supportedByElements) || clock === undefined || found.frontEdgeMm === undefined)
+        return [];
       const named = supportedByElements.flatMap((number) => elements[number - 1] ?? []);
       const lying = layBreak(found, globe, eye);
       const laid = named.map((element) => layElement(element, globe, eye));
