@@ -18,7 +18,8 @@ const medicines = (plan: Plan, written: Written, clock: Clock): Medicines => {
   const { random, eye } = plan;
   const givenAt = addMinutes(clock.endedAt, -random.whole(1, 5));
   if (plan.scenario.name === 'pneumatic retinopexy') {
-    return [{ drug: 'chloramphenicol', dose: '1 drop', route: 'topical', eye, givenAt }];
+    const drug = allergicTo(written.who, 'chloramphenicol') ? 'ofloxacin' : 'chloramphenicol';
+    return [{ drug, dose: '1 drop', route: 'topical', eye, givenAt }];
   }
   const antibiotic =
     allergicTo(written.who, 'penicillin') || random.chance(0.3)

@@ -42,11 +42,16 @@ const positionsFor = (plan: Plan, tamponade: Tamponade): readonly Position[] => 
   const worst = (positions: readonly Position[]) =>
     Math.max(...places.map((place) => Math.min(...positions.map((at) => fromTop(at, place, axialLengthMm)))));
   const half = reach(plan, tamponade);
-  const highest = choicesInOrder.filter((positions) => worst(positions) <= Math.min(60, half - 8));
+  const reached = Math.min(60, half - 8);
+  /** Nobody is asked to lie in a position that does nothing for any break; face down is for the macula. */
+  const needed = (positions: readonly Position[]) =>
+    positions.length === 1 ||
+    positions.every((at) => at === 'face-down' || worst(positions.filter((other) => other !== at)) > reached);
+  const highest = choicesInOrder.filter((positions) => worst(positions) <= reached && needed(positions));
   if (highest.length > 0) return random.pick(highest.slice(0, 3));
   // A little air beside a buckle only restores the volume.
   if (beside) return [];
-  const wetted = [...choicesInOrder].sort((a, b) => worst(a) - worst(b));
+  const wetted = choicesInOrder.filter(needed).sort((a, b) => worst(a) - worst(b));
   return wetted[0] ?? ['face-down'];
 };
 
@@ -54,6 +59,15 @@ const course = (plan: Plan, position: Position, days: number): Posture =>
   plan.random.chance(0.5)
     ? { position, minutesAnHour: plan.random.pick([45, 50, 50]), days }
     : { position, hoursADay: plan.random.pick([12, 14, 16, 18]), days };
+
+/** Two positions: face down first and then the other, or the one by day and the other by night. */
+const twoCourses = (plan: Plan, first: Position, second: Position, days: number): Posture[] =>
+  first === 'face-down'
+    ? [course(plan, first, 1), course(plan, second, days)]
+    : [
+        { position: first, hoursADay: plan.random.pick([8, 10]), days },
+        { position: second, hoursADay: plan.random.pick([6, 8]), days },
+      ];
 
 const daysFor = (plan: Plan): number => {
   const { random } = plan;
@@ -82,6 +96,9 @@ export const postureOf = (
     return [course(plan, 'face-down', random.whole(2, 5))];
   }
   const positions = positionsFor(plan, tamponade);
-  if (positions.length === 0) return 'none';
-  return positions.map((position) => course(plan, position, daysFor(plan)));
+  const [first, second] = positions;
+  if (first === undefined) return 'none';
+  return second === undefined
+    ? [course(plan, first, daysFor(plan))]
+    : twoCourses(plan, first, second, daysFor(plan));
 };

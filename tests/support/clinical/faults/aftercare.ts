@@ -38,7 +38,9 @@ export const aftercareFaults = [
     hasLongGas(r) ? { 'aftercare.wristband': false } : null,
   ),
   missing(['wristband-left-blank', 'omission', 'Wristband left blank'], 'aftercare.wristband', hasLongGas),
-  wrong(['no-drops', 'caution', 'No drops after the operation'], () => ({ 'aftercare.drops': 'none' })),
+  wrong(['no-drops', 'caution', 'No drops after the operation'], (r) =>
+    r.who?.performed?.includes('pneumatic-retinopexy') ? null : { 'aftercare.drops': 'none' },
+  ),
   missing(['drops-left-blank', 'omission', 'Drops left blank'], 'aftercare.drops'),
   wrong(['no-review', 'omission', 'No review'], () => ({
     'aftercare.reviewAt': undefined,

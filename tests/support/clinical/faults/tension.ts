@@ -50,9 +50,7 @@ export const tensionFaults = [
   ),
   tension.wrong(
     ['disc-pale-and-left', 'omission', 'Disc not perfused, no complication, nothing done'],
-    () => ({
-      'endOfCase.discPerfused': false,
-    }),
+    (r) => (r.endOfCase?.complications === 'none' ? { 'endOfCase.discPerfused': false } : null),
   ),
   tension.missing(
     ['disc-not-looked-at', 'omission', 'Nothing said of the disc after a buckle'],

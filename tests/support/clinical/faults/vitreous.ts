@@ -118,7 +118,10 @@ export const vitreousFaults = [
   inItem(
     ['cut-retina-not-treated', 'omission', 'A retinectomy without retinopexy'],
     'vitreous.retinotomies',
-    () => ({ treatedBy: 'none' }),
+    (_cut, r) =>
+      listAt(r, 'retinopexy.treatments').some((t) => t.targets === 'circumferential')
+        ? null
+        : { treatedBy: 'none' },
   ),
   inItem(
     ['retinectomy-without-extent', 'omission', 'A retinectomy without its hours'],
