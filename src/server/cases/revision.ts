@@ -24,7 +24,8 @@ export const lockRevision = async (
   action: 'case:write' | 'case:sign',
 ): Promise<Result<typeof cases.$inferSelect, ApiError>> => {
   const row = await lockCase(tx, unitId, caseId);
-  if (row === undefined) return { ok: false, error: { code: 'not-found', message: 'There is no such case.' } };
+  if (row === undefined)
+    return { ok: false, error: { code: 'not-found', message: 'There is no such case.' } };
   const signed = needsDraft(row.state);
   if (signed !== undefined) return { ok: false, error: signed };
   if (!may(roles, action, row.state)) {

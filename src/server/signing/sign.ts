@@ -19,7 +19,8 @@ import { database } from '../database.ts';
 import { noteDocx } from '../documents/note-docx.ts';
 import { draftLettersOf } from '../letters/on-signed.ts';
 
-export const sha256 = (content: string | Uint8Array): string => createHash('sha256').update(content).digest('hex');
+export const sha256 = (content: string | Uint8Array): string =>
+  createHash('sha256').update(content).digest('hex');
 
 /** The zone in which times are printed. */
 export const ZONE = Intl.DateTimeFormat().resolvedOptions().timeZone;
@@ -87,7 +88,11 @@ export const signCase = async (
       docxSha256: sha256(docx),
     });
     await tx.update(cases).set({ state: 'signed' }).where(eq(cases.id, caseId));
-    await appendAudit(tx, actorOf(visit), 'note:signed', signedVersionId, { caseId, sha256: hash, version: 1 });
+    await appendAudit(tx, actorOf(visit), 'note:signed', signedVersionId, {
+      caseId,
+      sha256: hash,
+      version: 1,
+    });
     await draftLettersOf(tx, signedVersionId, frozen);
     return ok({
       signedVersionId,

@@ -59,7 +59,10 @@ export const prove = async (db: Database, { row, note }: SignedNote): Promise<Pr
     { title: 'Its SHA-256 is the one stored at signature', holds: sha256(row.canonical) === row.sha256 },
     { title: 'The log holds the same SHA-256', holds: entry?.detail.sha256 === row.sha256 },
     { title: 'The document is the one stored at signature', holds: sha256(row.docx) === row.docxSha256 },
-    { title: 'The document made again from the facts is the same, byte for byte', holds: remade.equals(row.docx) },
+    {
+      title: 'The document made again from the facts is the same, byte for byte',
+      holds: remade.equals(row.docx),
+    },
     { title: 'The chain of the log is unbroken', holds: (await firstBrokenPosition(db)) === null },
   ];
 };
