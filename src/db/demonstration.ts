@@ -1,0 +1,1 @@
+export { demonstrationPeople } from '../server/demonstration-people.ts';
