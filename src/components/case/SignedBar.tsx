@@ -10,7 +10,7 @@ export const SignedBar = ({ signed }: { signed: CaseSigned }) => (
       Signed as version {signed.version}, {when(signed.signedAt)} UTC. Verification code{' '}
       <strong>{signed.verificationCode}</strong>.
     </span>
-    <a href={`/api/signed/${signed.signedVersionId}/docx`}>Document (DOCX)</a>
+    <a href={`/api/signed/${signed.signedVersionId}/note.docx`}>Document (DOCX)</a>
     <a href="/">Back to the theatre list</a>
   </div>
 );

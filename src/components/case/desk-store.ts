@@ -1,6 +1,6 @@
 import { type Answer, type Flag, flagKey, isAnswered, type Level, levels } from '../../domain/checks/flag.ts';
 import type { Draft, DraftedTable, Sheet } from '../../domain/drafting/sheet.ts';
-import type { Figure } from '../../domain/physics/numbers.ts';
+import type { Figure } from '../../domain/physics/figure.ts';
 import { covers, type FieldPath, withValue } from '../../domain/record/paths.ts';
 import { withoutNumbered } from '../../domain/record/remove-numbered.ts';
 import type { CaseRecord, Stage } from '../../domain/record/schema.ts';
