@@ -6,11 +6,10 @@ import { log } from './server/http/log.ts';
 const open = new Set(['/sign-in', '/404', '/403', '/500']);
 
 /** Styles that islands write on their elements need the attribute allowed; styles in files stay hashed. */
-const allowStyleAttributes = (html: string) =>
-  html.replace(
-    /(<meta http-equiv="content-security-policy" content="[^"]*)"/,
-    `$1 style-src-attr 'unsafe-inline';"`,
-  );
+const allowStyleAttributes = (headers: Headers) => {
+  const policy = headers.get('content-security-policy');
+  if (policy !== null) headers.set('content-security-policy', `${policy} style-src-attr 'unsafe-inline';`);
+};
 
 export const onRequest = defineMiddleware(async (context, next) => {
   if (context.isPrerendered) return next();
@@ -32,6 +31,6 @@ export const onRequest = defineMiddleware(async (context, next) => {
     'answered',
   );
   if (response.status === 403 && !isApi && response.body === null) return context.rewrite('/403');
-  if (!(response.headers.get('content-type') ?? '').startsWith('text/html')) return response;
-  return new Response(allowStyleAttributes(await response.text()), response);
+  allowStyleAttributes(response.headers);
+  return response;
 });
