@@ -206,7 +206,6 @@ const procedures = (record: CaseRecord): Pick<Coding, 'proposed' | 'rejected'> =
     add('67107', reason('placed', 'buckle.elements'));
     if (cold) reject('67101', 'included in the scleral buckle');
     if (laser) reject('67105', 'included in the scleral buckle');
-    if (record.drainage?.kind === 'external') reject('67015', 'drainage is included in the scleral buckle');
   } else if (gas && detached) {
     add('67110', reason('injected', 'tamponade.agent'));
   } else if (detached) {
