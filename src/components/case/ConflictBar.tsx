@@ -80,9 +80,11 @@ export const ConflictBar = ({ autosave }: { autosave: Autosave }) => {
         <button type="button" className="case-link" onClick={() => autosave.save()}>
           Save now
         </button>
-        <a href="/sign-in" target="_blank" rel="noreferrer">
-          Sign in again in another tab
-        </a>
+        {state.code === 'sign-in-needed' && (
+          <a href="/sign-in" target="_blank" rel="noreferrer">
+            Sign in again in another tab
+          </a>
+        )}
       </div>
     );
   }

@@ -5,7 +5,7 @@ export type SaveState =
   | { kind: 'saved'; at: string }
   | { kind: 'waiting' }
   | { kind: 'saving' }
-  | { kind: 'failed'; message: string; retrying: boolean }
+  | { kind: 'failed'; code: string; message: string; retrying: boolean }
   | { kind: 'stale'; theirs: CaseView };
 
 const time = (instant: string) =>

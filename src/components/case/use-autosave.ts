@@ -10,7 +10,9 @@ const longestWait = 30_000;
 /** Refusals that go away by themselves. */
 const passing = ['offline', 'failed', 'too-many-attempts'];
 
-const isPassing = (error: Error) => error instanceof Refusal && passing.includes(error.answer.code);
+const codeOf = (error: Error) => (error instanceof Refusal ? error.answer.code : 'failed');
+
+const isPassing = (error: Error) => passing.includes(codeOf(error));
 
 /** Keeps the case on the server without being asked, one save after another, each upon the revision before. */
 export const useAutosave = (store: DeskStore, view: CaseView, enabled: boolean) => {
@@ -30,7 +32,7 @@ export const useAutosave = (store: DeskStore, view: CaseView, enabled: boolean) 
     networkMode: 'always',
     retry: (_, error) => {
       if (!isPassing(error)) return false;
-      setState({ kind: 'failed', message: error.message, retrying: true });
+      setState({ kind: 'failed', code: codeOf(error), message: error.message, retrying: true });
       return true;
     },
     retryDelay: (attempt) => Math.min(1000 * 2 ** attempt, longestWait),
@@ -38,7 +40,7 @@ export const useAutosave = (store: DeskStore, view: CaseView, enabled: boolean) 
       const answer = error instanceof Refusal ? error.answer : null;
       if (answer?.code === 'stale' && answer.current !== undefined) {
         setState({ kind: 'stale', theirs: answer.current });
-      } else setState({ kind: 'failed', message: answer?.message ?? error.message, retrying: false });
+      } else setState({ kind: 'failed', code: codeOf(error), message: error.message, retrying: false });
     },
   });
 
