@@ -1,4 +1,4 @@
-import { checkRecord } from '../../domain/checks/engine.ts';
+import { checkCase } from '../../domain/checks/check-case.ts';
 import { draftNote } from '../../domain/drafting/draft.ts';
 import { mergeSheet } from '../../domain/drafting/merge.ts';
 import { numbersOf } from '../../domain/physics/numbers.ts';
@@ -6,7 +6,7 @@ import type { Derivers } from './desk-store.ts';
 
 /** The domain's own answers, in the browser. The server asks the same again on save and at signature. */
 export const derivers: Derivers = {
-  check: checkRecord,
+  check: checkCase,
   draft: draftNote,
   merge: mergeSheet,
   figures: numbersOf,

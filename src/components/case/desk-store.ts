@@ -8,7 +8,7 @@ import type { BadEntry } from '../ui/EntryBox.tsx';
 
 /** What the page works out from a record, at every change. */
 export interface Derivers {
-  check: (record: CaseRecord) => Flag[];
+  check: (record: CaseRecord, sheet: Sheet) => Flag[];
   draft: (record: CaseRecord) => Draft;
   merge: (sheet: Sheet | null, draft: Draft) => Sheet;
   figures: (record: CaseRecord) => Figure[];
@@ -102,8 +102,9 @@ export const createDeskStore = (start: Content & { stage: Stage }, derive: Deriv
   let last: Derived | undefined;
 
   const derived = (record: CaseRecord, sheet: Sheet | null, answers: readonly Answer[]): Derived => {
-    const flags = steady(last?.flags, derive.check(record));
     const draft = derive.draft(record);
+    const merged = derive.merge(sheet, draft);
+    const flags = steady(last?.flags, derive.check(record, merged));
     const now: Derived = {
       record,
       answers,
@@ -111,7 +112,7 @@ export const createDeskStore = (start: Content & { stage: Stage }, derive: Deriv
       figures: steady(last?.figures, derive.figures(record)),
       levels: worstLevels(flags, answers),
       described: flags === last?.flags ? last.described : descriptions(flags),
-      sheet: steady(sheet ?? undefined, derive.merge(sheet, draft)),
+      sheet: steady(sheet ?? undefined, merged),
       tables: steady(last?.tables, draft.tables),
     };
     last = now;

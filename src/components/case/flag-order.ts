@@ -71,6 +71,7 @@ export interface PlacedFlag {
 export const placeFlags = (flags: readonly Flag[], sheet: Sheet): PlacedFlag[] => {
   const statements = sheet.sections.flatMap(standing);
   return flags.map((flag) => {
+    if (flag.statement !== undefined) return { flag, beside: flag.statement, underlaid: true };
     const about = best(statements, (statement) => {
       const points = closeness(flag, statement);
       return points === 0 ? 0 : points + 1 / (1 + statement.reads.length);

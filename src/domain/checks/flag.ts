@@ -15,6 +15,8 @@ export interface Flag {
   message: string;
   /** Whether a reason may answer it; otherwise only the record can. */
   answerable: boolean;
+  /** Statement of the sheet whose words it is about, where it is about words. */
+  statement?: string;
 }
 
 /** A reason given for leaving a flag as it is. It counts only as long as the flag says the same. */

@@ -1,7 +1,7 @@
 import { eq } from 'drizzle-orm';
 import { caseRevisions, cases } from '../../db/schema.ts';
 import type { ApiError, CaseSaved, SaveCase } from '../../domain/api.ts';
-import { checkRecord } from '../../domain/checks/engine.ts';
+import { checkCase } from '../../domain/checks/check-case.ts';
 import type { Answer } from '../../domain/checks/flag.ts';
 import { ok, type Result } from '../../domain/result.ts';
 import { actorOf, type Visit } from '../accounts/visit.ts';
@@ -43,7 +43,7 @@ export const saveCase = (
     return ok({
       revision: next.revision,
       savedAt: savedAt.toISOString(),
-      flags: checkRecord(record),
+      flags: checkCase(record, sheet),
       answers: stamped,
     });
   });

@@ -2,7 +2,8 @@ import { createHash, randomUUID } from 'node:crypto';
 import { eq } from 'drizzle-orm';
 import { cases, signedVersions } from '../../db/schema.ts';
 import { type ApiError, type CaseSigned, meanings, type SignCase } from '../../domain/api.ts';
-import { checkRecord, RULES_VERSION } from '../../domain/checks/engine.ts';
+import { checkCase } from '../../domain/checks/check-case.ts';
+import { RULES_VERSION } from '../../domain/checks/engine.ts';
 import { blocking } from '../../domain/checks/flag.ts';
 import { draftNote } from '../../domain/drafting/draft.ts';
 import { mergeSheet } from '../../domain/drafting/merge.ts';
@@ -44,7 +45,8 @@ export const signCase = async (
     const locked = await lockRevision(tx, asked, 'case:sign');
     if (!locked.ok) return locked;
     const { record, answers } = locked.value;
-    const flags = checkRecord(record);
+    const sheet = mergeSheet(locked.value.sheet, draftNote(record));
+    const flags = checkCase(record, sheet);
     const inTheWay = blocking(flags, answers);
     if (inTheWay.length > 0) {
       const message = 'Some flags stand in the way of the signature.';
@@ -57,7 +59,7 @@ export const signCase = async (
       caseId,
       version: 1,
       record,
-      sheet: mergeSheet(locked.value.sheet, draftNote(record)),
+      sheet,
       flags,
       answers,
       unit: unitView,

@@ -112,6 +112,9 @@ const isoOf = (match: RegExpMatchArray): string => {
 const aboutReview = /\b(?:review(?:ed)?|seen(?: again)?|appointment|clinic|follow-?up|come back|return)\b/;
 const aboutOperation = /\b(?:operated(?: on)?|operation|surgery|underwent|procedure|performed|treated)\b/;
 
+/** Dates of birth, of the referral and of operations to come are others. */
+const notThisOperation = /\b(?:born|referral|referred|next|planned|removal|remove)\b/;
+
 const readDate: Reader = (clause, record) => {
   const operated = record.who?.startedAt?.slice(0, 10);
   const review = record.aftercare?.reviewAt?.slice(0, 10);
@@ -123,7 +126,8 @@ const readDate: Reader = (clause, record) => {
         ? []
         : [deny('date', clause, spanOf(match), 'aftercare.reviewAt', review)];
     }
-    if (!aboutOperation.test(clause.plain) || /\bborn\b/.test(before)) return [];
+    const near = before.slice(-40);
+    if (!aboutOperation.test(near) || notThisOperation.test(near)) return [];
     return operated === undefined || said === operated
       ? []
       : [deny('date', clause, spanOf(match), 'who.startedAt', operated)];

@@ -179,7 +179,9 @@ const readBreakCount: Reader = (clause, record) => {
         return (
           list.length > 0 &&
           noun === 'break' &&
-          !/(?:were|was) (?:left|missed|open|unsupported|untreated)|other|new/.test(clause.plain)
+          /^\s*(?:(?:was|were|is|are) )?(?:found|seen|identified|present|visible|detected)?\s*[.,;]?\s*$/.test(
+            clause.plain.slice(match.index + words.length),
+          )
         );
       if (how === 'both') return total !== 2 && list.length !== 2;
       if (how === 'multiple' || how === 'several') return total < 2;

@@ -121,7 +121,7 @@ const claims: readonly Claim[] = [
       hasRole(record, ['encircling']) === true ? 'encircling band' : 'no encircling band',
   },
   {
-    words: /\b(?:scleral buckle|buckling)\b/g,
+    words: /\b(?:scleral buckle|buckling(?! element))\b/g,
     happened: ({ buckle }) => some(buckle?.elements),
     field: 'buckle.elements',
     recorded: ({ buckle }) => (some(buckle?.elements) === true ? 'a buckle' : 'no buckle'),

@@ -54,7 +54,7 @@ const readAgent: Reader = (clause, record) => {
     if (
       negated
         ? named === agent && /\b(?:no|without)\s+(?:\w+\s+)?$/.test(clause.plain.slice(0, match.index))
-        : named !== agent
+        : named !== agent && !(named === 'silicone-oil' && agent === 'heavy-oil')
     ) {
       found.push(deny('agent', clause, spanOf(match), 'tamponade.agent', recorded));
     }
