@@ -103,7 +103,8 @@ const columnOfPath: Readonly<Record<string, Column>> = {
   'who.familyDoctor': 'family doctor',
 };
 
-const readRow = (cells: Readonly<Record<Column, string>>, line: number): ListRow => {
+/** Reads one case; `line` is where it stands in a file. */
+export const readRow = (cells: Readonly<Record<Column, string>>, line: number): ListRow => {
   const errors: ListRow['errors'] = [];
   const refuse = (column: Column, message: string) => errors.push({ column, message });
   for (const column of required) if (cells[column] === '') refuse(column, 'Missing');

@@ -3,6 +3,7 @@ import { may } from '../../domain/access/policy.ts';
 import type { CaseSigned, CaseView } from '../../domain/api.ts';
 import { actorOf, type Visit } from '../accounts/visit.ts';
 import { appendAudit } from '../audit/log.ts';
+import { localDay } from '../local-day.ts';
 import { readSigned, signedOf } from '../signing/signed-version.ts';
 import { loadCase, viewOf } from './load.ts';
 
@@ -15,11 +16,6 @@ export interface OpenedCase {
 
 const UUID = /^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/;
 
-const localDay = (now: Date) =>
-  [now.getFullYear(), now.getMonth() + 1, now.getDate()]
-    .map((part) => String(part).padStart(2, '0'))
-    .join('-');
-
 /**
  * A case as its page shows it: the draft, or what was signed, whose reading is entered in the log. `undefined` when there
  * is no such case in the unit, or none that this person may read.
@@ -27,7 +23,7 @@ const localDay = (now: Date) =>
 export const openCase = async (db: Database, visit: Visit, id: string): Promise<OpenedCase | undefined> => {
   const row = UUID.test(id) ? await loadCase(db, visit.unit.id, id) : undefined;
   if (row === undefined) return undefined;
-  const today = localDay(new Date());
+  const today = localDay();
   const { roles } = visit.person;
   if (row.state === 'draft') {
     return may(roles, 'case:read-draft', row.state) ? { view: viewOf(row), signed: null, today } : undefined;
