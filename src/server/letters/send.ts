@@ -1,6 +1,6 @@
 import { and, eq } from 'drizzle-orm';
 import type { Database } from '../../db/client.ts';
-import { cases, letters, recipients, signedVersions, units } from '../../db/schema.ts';
+import { cases, letters, signedVersions, units } from '../../db/schema.ts';
 import { type Actor, appendAudit } from '../audit/log.ts';
 import { config } from '../config.ts';
 import { documentName } from '../documents/document-name.ts';
@@ -63,15 +63,3 @@ export const queuedLetters = async (db: Database): Promise<string[]> => {
   const rows = await db.select({ id: letters.id }).from(letters).where(eq(letters.state, 'queued'));
   return rows.map(({ id }) => id);
 };
-
-/** Recipients that a letter may go to: active, with an address that somebody confirmed. */
-export const confirmedRecipients = (db: Database, unitId: string) =>
-  db
-    .select({
-      id: recipients.id,
-      name: recipients.name,
-      practice: recipients.practice,
-      email: recipients.email,
-    })
-    .from(recipients)
-    .where(and(eq(recipients.unitId, unitId), eq(recipients.active, true)));

@@ -1,0 +1,87 @@
+import { and, asc, eq } from 'drizzle-orm';
+import { z } from 'zod';
+import type { Database } from '../../db/client.ts';
+import { people } from '../../db/schema.ts';
+import { roles } from '../../domain/access/policy.ts';
+import { ok, type Result } from '../../domain/result.ts';
+import { hashPassword } from '../accounts/passwords.ts';
+import { lucia } from '../accounts/sessions.ts';
+import { actorOf, type Visit } from '../accounts/visit.ts';
+import { appendAudit } from '../audit/log.ts';
+import { database } from '../database.ts';
+import { type FormErrors, readForm, typedIn } from './read-form.ts';
+
+const password = z.string().min(12, 'Use at least 12 characters').max(200);
+
+const form = z.object({
+  name: z.string().trim().min(2, 'Write the name as it is printed under a signature').max(200),
+  title: z.string().trim().min(2, 'Write the title, like Consultant vitreoretinal surgeon').max(200),
+  email: z.email('Write an e-mail address, like name@example.org').max(200).toLowerCase(),
+  roles: z.array(z.enum(roles)).min(1, 'Choose at least one role'),
+  password,
+});
+
+type PersonRow = typeof people.$inferSelect;
+
+export const peopleOf = (db: Database, unitId: string): Promise<PersonRow[]> =>
+  db.select().from(people).where(eq(people.unitId, unitId)).orderBy(asc(people.name), asc(people.id));
+
+export const addPerson = async (visit: Visit, sent: FormData): Promise<Result<null, FormErrors>> => {
+  const read = readForm(form, sent, ['roles']);
+  if (!read.ok) return read;
+  const { password: chosen, ...person } = read.value;
+  const passwordHash = await hashPassword(chosen);
+  return database().transaction(async (tx): Promise<Result<null, FormErrors>> => {
+    const [row] = await tx
+      .insert(people)
+      .values({ ...person, unitId: visit.unit.id, passwordHash })
+      .onConflictDoNothing()
+      .returning({ id: people.id });
+    if (row === undefined) {
+      return {
+        ok: false,
+        error: { errors: { email: 'Somebody has this e-mail address already' }, typed: typedIn(sent) },
+      };
+    }
+    await appendAudit(tx, actorOf(visit), 'person:added', row.id, { roles: person.roles.join(' ') });
+    return ok(null);
+  });
+};
+
+/** Lets somebody in or keeps them out; whoever is kept out is signed out at once. Nobody can keep themselves out. */
+export const setActive = async (visit: Visit, id: string, active: boolean): Promise<void> => {
+  if (id === visit.person.id) return;
+  const changed = await database().transaction(async (tx) => {
+    const [row] = await tx
+      .update(people)
+      .set({ active })
+      .where(and(eq(people.id, id), eq(people.unitId, visit.unit.id)))
+      .returning({ id: people.id });
+    if (row !== undefined)
+      await appendAudit(tx, actorOf(visit), active ? 'person:activated' : 'person:deactivated', id);
+    return row !== undefined;
+  });
+  if (changed && !active) await lucia().invalidateUserSessions(id);
+};
+
+/** Gives somebody a new password and ends their sessions. */
+export const setPassword = async (
+  visit: Visit,
+  id: string,
+  chosen: string,
+): Promise<Result<null, FormErrors>> => {
+  const read = password.safeParse(chosen);
+  if (!read.success)
+    return { ok: false, error: { errors: { password: read.error.issues[0]?.message ?? '' }, typed: {} } };
+  const passwordHash = await hashPassword(read.data);
+  await database().transaction(async (tx) => {
+    const [row] = await tx
+      .update(people)
+      .set({ passwordHash })
+      .where(and(eq(people.id, id), eq(people.unitId, visit.unit.id)))
+      .returning({ id: people.id });
+    if (row !== undefined) await appendAudit(tx, actorOf(visit), 'person:password-set', id);
+  });
+  await lucia().invalidateUserSessions(id);
+  return ok(null);
+};
