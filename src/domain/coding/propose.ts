@@ -7,7 +7,9 @@ import {
   previousOf,
   treatmentsOf,
 } from '../checks/facts.ts';
+import { labelOf, listWords, numberWords } from '../drafting/words.ts';
 import { fieldLabel } from '../record/field-tree.ts';
+import { valueAt } from '../record/paths.ts';
 import type { CaseRecord } from '../record/schema.ts';
 import { type Certainty, type CodeSetName, codeSets } from './code-sets.ts';
 
@@ -41,8 +43,19 @@ export interface Coding {
   questions: string[];
 }
 
-const reason = (words: string, ...fields: string[]): Because[] =>
-  fields.map((field) => ({ field, words: `${fieldLabel(field)}: ${words}` }));
+const shown = (field: string, value: unknown): string => {
+  if (typeof value === 'string') return labelOf(field, value);
+  if (typeof value === 'boolean') return value ? 'yes' : 'no';
+  if (typeof value === 'number') return numberWords(value);
+  if (!Array.isArray(value)) return 'not recorded';
+  if (value.every((one) => typeof one === 'string'))
+    return listWords(value.map((one) => labelOf(field, one)));
+  return `${value.length} recorded`;
+};
+
+/** The facts at these fields, in the record's own words. */
+const reason = (record: CaseRecord, ...fields: string[]): Because[] =>
+  fields.map((field) => ({ field, words: `${fieldLabel(field)}: ${shown(field, valueAt(record, field))}` }));
 
 const entryOf = (set: CodeSetName, stem: string) => codeSets[set].entries[stem];
 
@@ -76,9 +89,9 @@ const diagnoses = (record: CaseRecord): Proposal[] => {
   const { diagnosis, field } = diagnosisOf(record);
   const eye = record.who?.eye;
   const found = breaksOf(record).filter(({ kind }) => kind !== 'macular-hole');
-  const why = (words: string, ...more: string[]) => reason(words, field, 'who.eye', ...more);
-  const detachment = (stem: string, words: string, ...more: string[]) =>
-    propose('ICD-10-CM', stem, `${stem}${sixth(eye)}`, [], why(words, ...more));
+  const why = (...more: string[]) => reason(record, field, 'who.eye', ...more);
+  const detachment = (stem: string, ...more: string[]) =>
+    propose('ICD-10-CM', stem, `${stem}${sixth(eye)}`, [], why(...more));
   const haemorrhage =
     record.before?.vitreousHaemorrhage === true
       ? propose(
@@ -86,36 +99,31 @@ const diagnoses = (record: CaseRecord): Proposal[] => {
           'H43.1',
           `H43.1${fifth(eye)}`,
           [],
-          reason('recorded', 'before.vitreousHaemorrhage', 'who.eye'),
+          reason(record, 'before.vitreousHaemorrhage', 'who.eye'),
         )
       : [];
   switch (diagnosis) {
     case 'rhegmatogenous': {
       if (record.before?.totalDetachment === true) {
-        return [...detachment('H33.05', 'total detachment', 'before.totalDetachment'), ...haemorrhage];
+        return [...detachment('H33.05', 'before.totalDetachment'), ...haemorrhage];
       }
       const stem = found.length === 0 ? 'H33.00' : found.length === 1 ? 'H33.01' : 'H33.02';
-      const words = found.length === 0 ? 'no break recorded' : `${found.length} recorded`;
-      return [...detachment(stem, words, 'breaks.found'), ...haemorrhage];
+      return [...detachment(stem, 'breaks.found'), ...haemorrhage];
     }
     case 'giant-tear':
-      return [...detachment('H33.03', 'giant retinal tear', 'breaks.found'), ...haemorrhage];
+      return [...detachment('H33.03', 'breaks.found'), ...haemorrhage];
     case 'dialysis':
-      return [...detachment('H33.04', 'dialysis', 'breaks.found'), ...haemorrhage];
+      return [...detachment('H33.04', 'breaks.found'), ...haemorrhage];
     case 'combined':
       return [
-        ...detachment(
-          found.length > 1 ? 'H33.02' : found.length === 1 ? 'H33.01' : 'H33.00',
-          'combined detachment',
-          'breaks.found',
-        ),
-        ...propose('ICD-10-CM', 'H33.4', `H33.4${fifth(eye)}`, [], why('combined detachment')),
+        ...detachment(found.length > 1 ? 'H33.02' : found.length === 1 ? 'H33.01' : 'H33.00', 'breaks.found'),
+        ...propose('ICD-10-CM', 'H33.4', `H33.4${fifth(eye)}`, [], why()),
         ...haemorrhage,
       ];
     case 'tractional':
-      return [...propose('ICD-10-CM', 'H33.4', `H33.4${fifth(eye)}`, [], why('traction')), ...haemorrhage];
+      return [...propose('ICD-10-CM', 'H33.4', `H33.4${fifth(eye)}`, [], why()), ...haemorrhage];
     case 'serous':
-      return [...propose('ICD-10-CM', 'H33.2', `H33.2${fifth(eye)}`, [], why('serous')), ...haemorrhage];
+      return [...propose('ICD-10-CM', 'H33.2', `H33.2${fifth(eye)}`, [], why()), ...haemorrhage];
     case 'break-without-detachment': {
       const [only] = found;
       const stem =
@@ -126,7 +134,7 @@ const diagnoses = (record: CaseRecord): Proposal[] => {
             : only?.kind === 'round-hole' || only?.kind === 'operculated'
               ? 'H33.32'
               : 'H33.30';
-      return [...detachment(stem, 'without detachment', 'breaks.found'), ...haemorrhage];
+      return [...detachment(stem, 'breaks.found'), ...haemorrhage];
     }
     default:
       return haemorrhage;
@@ -144,11 +152,9 @@ const complexity = (record: CaseRecord): Because[] => {
   );
   const { diagnosis, field } = diagnosisOf(record);
   return [
-    ...(grade !== undefined && complexGrades.includes(grade)
-      ? reason(`grade ${grade}`, 'before.pvr.grade')
-      : []),
-    ...(giant >= 0 ? reason('a tear of more than 90°', `breaks.found.${giant}.extentClockHours`) : []),
-    ...(diagnosis === 'tractional' || diagnosis === 'combined' ? reason('traction', field) : []),
+    ...(grade !== undefined && complexGrades.includes(grade) ? reason(record, 'before.pvr.grade') : []),
+    ...(giant >= 0 ? reason(record, `breaks.found.${giant}.extentClockHours`) : []),
+    ...(diagnosis === 'tractional' || diagnosis === 'combined' ? reason(record, field) : []),
   ];
 };
 
@@ -176,15 +182,15 @@ const procedures = (record: CaseRecord): Pick<Coding, 'proposed' | 'rejected'> =
 
   if (performed.includes('element-removal')) {
     const released = previousOf(record).some(({ what }) => what === 'encircling-band');
-    add(released ? '67115' : '67120', reason('removal or release', 'who.performed'));
+    add(released ? '67115' : '67120', reason(record, 'who.performed'));
   }
-  if (performed.includes('oil-removal') && !detached) add('67121', reason('oil removed', 'who.performed'));
+  if (performed.includes('oil-removal') && !detached) add('67121', reason(record, 'who.performed'));
 
   if (vitrectomy && detached) {
     const complex = complexity(record);
-    const basis = reason('performed', 'vitreous.vitrectomy');
+    const basis = reason(record, 'vitreous.vitrectomy');
     if (complex.length > 0 && peeled) {
-      add('67113', [...basis, ...reason('peeled', 'vitreous.membranesPeeled'), ...complex]);
+      add('67113', [...basis, ...reason(record, 'vitreous.membranesPeeled'), ...complex]);
       reject('67108', 'one vitrectomy code an eye: 67113 applies');
     } else {
       add('67108', basis);
@@ -201,37 +207,36 @@ const procedures = (record: CaseRecord): Pick<Coding, 'proposed' | 'rejected'> =
     if (cold) reject('67101', 'included in the vitrectomy for detachment');
     reject('67036', 'vitrectomy for detachment is coded by 67108 or 67113 only');
   } else if (vitrectomy) {
-    add('67036', reason('performed, no detachment', 'vitreous.vitrectomy'));
+    add('67036', reason(record, 'vitreous.vitrectomy'));
   } else if (buckle && detached) {
-    add('67107', reason('placed', 'buckle.elements'));
+    add('67107', reason(record, 'buckle.elements'));
     if (cold) reject('67101', 'included in the scleral buckle');
     if (laser) reject('67105', 'included in the scleral buckle');
   } else if (gas && detached) {
-    add('67110', reason('injected', 'tamponade.agent'));
+    add('67110', reason(record, 'tamponade.agent'));
   } else if (detached) {
-    if (laser) add('67105', reason('laser', 'retinopexy.treatments'));
-    else if (cold) add('67101', reason('cryotherapy or diathermy', 'retinopexy.treatments'));
+    if (laser) add('67105', reason(record, 'retinopexy.treatments'));
+    else if (cold) add('67101', reason(record, 'retinopexy.treatments'));
   } else if (diagnosis === 'break-without-detachment') {
-    if (laser) add('67145', reason('laser', 'retinopexy.treatments'));
-    else if (cold) add('67141', reason('cryotherapy or diathermy', 'retinopexy.treatments'));
+    if (laser) add('67145', reason(record, 'retinopexy.treatments'));
+    else if (cold) add('67141', reason(record, 'retinopexy.treatments'));
   }
   return { proposed, rejected };
 };
 
 const opcs = (record: CaseRecord): Proposal[] => {
-  const add = (code: string, words: string, field: string) =>
-    propose('OPCS-4', code, code, [], reason(words, field));
+  const add = (code: string, field: string) => propose('OPCS-4', code, code, [], reason(record, field));
   const eye = record.who?.eye;
   const laser = treatmentsOf(record).some(({ modality }) => modality?.includes('laser') === true);
   const acts = [
-    ...(record.vitreous?.vitrectomy === true ? add('C79.2', 'performed', 'vitreous.vitrectomy') : []),
-    ...(gasOf(record) !== undefined ? add('C79.5', 'gas', 'tamponade.agent') : []),
-    ...(oilOf(record) !== undefined ? add('C79.6', 'oil', 'tamponade.agent') : []),
-    ...(elementsOf(record).length > 0 ? add('C54', 'placed', 'buckle.elements') : []),
-    ...(laser ? add('C81', 'laser', 'retinopexy.treatments') : []),
+    ...(record.vitreous?.vitrectomy === true ? add('C79.2', 'vitreous.vitrectomy') : []),
+    ...(gasOf(record) !== undefined ? add('C79.5', 'tamponade.agent') : []),
+    ...(oilOf(record) !== undefined ? add('C79.6', 'tamponade.agent') : []),
+    ...(elementsOf(record).length > 0 ? add('C54', 'buckle.elements') : []),
+    ...(laser ? add('C81', 'retinopexy.treatments') : []),
   ];
   if (acts.length === 0 || eye === undefined) return acts;
-  return [...acts, ...add(eye === 'right' ? 'Z94.2' : 'Z94.3', eye, 'who.eye')];
+  return [...acts, ...add(eye === 'right' ? 'Z94.2' : 'Z94.3', 'who.eye')];
 };
 
 const questions = (record: CaseRecord): string[] => {
