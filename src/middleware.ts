@@ -30,7 +30,9 @@ export const onRequest = defineMiddleware(async (context, next) => {
     },
     'answered',
   );
-  if (response.status === 403 && !isApi && response.body === null) return context.rewrite('/403');
+  const isBare = response.body === null && !isApi;
+  if (isBare && (response.status === 403 || response.status === 404))
+    return context.rewrite(`/${response.status}`);
   allowStyleAttributes(response.headers);
   return response;
 });

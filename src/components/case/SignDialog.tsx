@@ -85,6 +85,7 @@ export const SignDialog = ({ id, autosave, onClose, onSigned }: Props) => {
           <input
             className="input"
             type="password"
+            data-first
             autoComplete="current-password"
             value={password}
             aria-invalid={isPassword}

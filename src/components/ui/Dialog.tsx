@@ -14,6 +14,8 @@ export const Dialog = ({ title, onClose, children }: Props) => {
   useEffect(() => {
     const before = document.activeElement;
     dialog.current?.showModal();
+    // What the panel asks for comes before its way out.
+    dialog.current?.querySelector<HTMLElement>('[data-first]')?.focus();
     return () => {
       if (before instanceof HTMLElement) before.focus();
     };

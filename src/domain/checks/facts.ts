@@ -1,3 +1,4 @@
+import type { ClockArc } from '../anatomy/clock.ts';
 import { dateWords, labelOf, listWords, numberWords } from '../drafting/words.ts';
 import { isGas } from '../physics/gas.ts';
 import type {
@@ -79,3 +80,17 @@ export const elementName = (element: BuckleElement, index: number): string =>
   element.role === 'encircling' ? 'The band' : `Element ${index + 1}`;
 
 export { dateWords, labelOf, listWords, numberWords };
+
+/** Where the retina is detached: an arc, the whole round, or `undefined` while it is not recorded. */
+export const detachedArcOf = (record: CaseRecord): ClockArc | 'all' | undefined => {
+  const { totalDetachment, detachmentFromClock: from, detachmentToClock: to } = record.before ?? {};
+  if (totalDetachment === true) return 'all';
+  return from === undefined || to === undefined ? undefined : { from, to };
+};
+
+/** Those of several facts that are absent; `field` is where each belongs, `what` how it is called. */
+export const missingFrom = <T extends { value: unknown }>(items: readonly T[]): T[] =>
+  items.filter(({ value }) => value === undefined);
+
+/** The same words with a capital at the start. */
+export const capital = (words: string): string => words.charAt(0).toUpperCase() + words.slice(1);

@@ -1,9 +1,12 @@
 import type { Rule } from './define-rule.ts';
 import { rule as absorbableFixation } from './rules/absorbable-fixation/rule.ts';
+import { rule as acuityAgainstMacula } from './rules/acuity-against-macula/rule.ts';
 import { rule as agentExchangeMismatch } from './rules/agent-exchange-mismatch/rule.ts';
 import { rule as allergyAgainstMedicine } from './rules/allergy-against-medicine/rule.ts';
 import { rule as anaesthetistMissing } from './rules/anaesthetist-missing/rule.ts';
+import { rule as assistantWithoutPart } from './rules/assistant-without-part/rule.ts';
 import { rule as axialLengthFromBeforeBand } from './rules/axial-length-from-before-band/rule.ts';
+import { rule as axialLengthUnusual } from './rules/axial-length-unusual/rule.ts';
 import { rule as bandDoesNotFitGlobe } from './rules/band-does-not-fit-globe/rule.ts';
 import { rule as bandFarFromUsualPlace } from './rules/band-far-from-usual-place/rule.ts';
 import { rule as bandFixedInFewQuadrants } from './rules/band-fixed-in-few-quadrants/rule.ts';
@@ -14,10 +17,15 @@ import { rule as bleedingRiskExternalDrainage } from './rules/bleeding-risk-exte
 import { rule as blockAgainstAnaesthesia } from './rules/block-against-anaesthesia/rule.ts';
 import { rule as blockEyeMissing } from './rules/block-eye-missing/rule.ts';
 import { rule as bornAfterSurgery } from './rules/born-after-surgery/rule.ts';
+import { rule as breakAsLargeAsGiantTear } from './rules/break-as-large-as-giant-tear/rule.ts';
 import { rule as breakEdgesCrossed } from './rules/break-edges-crossed/rule.ts';
+import { rule as breakEnteredTwice } from './rules/break-entered-twice/rule.ts';
 import { rule as breakOffItsZone } from './rules/break-off-its-zone/rule.ts';
+import { rule as breakOffTheDetachment } from './rules/break-off-the-detachment/rule.ts';
+import { rule as breakOffTheRetina } from './rules/break-off-the-retina/rule.ts';
 import { rule as breakUnsupported } from './rules/break-unsupported/rule.ts';
 import { rule as breakWithoutRetinopexy } from './rules/break-without-retinopexy/rule.ts';
+import { rule as breaksInSerousDetachment } from './rules/breaks-in-serous-detachment/rule.ts';
 import { rule as broadElementInOlderPatient } from './rules/broad-element-in-older-patient/rule.ts';
 import { rule as buckleWithoutOpening } from './rules/buckle-without-opening/rule.ts';
 import { rule as cephalosporinAfterPenicillinAllergy } from './rules/cephalosporin-after-penicillin-allergy/rule.ts';
@@ -29,12 +37,14 @@ import { rule as dateOutOfOrder } from './rules/date-out-of-order/rule.ts';
 import { rule as detachmentSurgeryRepeated } from './rules/detachment-surgery-repeated/rule.ts';
 import { rule as detachmentWithoutDetachment } from './rules/detachment-without-detachment/rule.ts';
 import { rule as diagnosisAgainstBreaks } from './rules/diagnosis-against-breaks/rule.ts';
+import { rule as dialysisOffTheOra } from './rules/dialysis-off-the-ora/rule.ts';
 import { rule as dilutionWrong } from './rules/dilution-wrong/rule.ts';
 import { rule as discNotPerfusedUnresolved } from './rules/disc-not-perfused-unresolved/rule.ts';
 import { rule as drainageDetailsWithoutDrainage } from './rules/drainage-details-without-drainage/rule.ts';
 import { rule as drainageRetinotomyMissing } from './rules/drainage-retinotomy-missing/rule.ts';
 import { rule as drainageWithoutOutcome } from './rules/drainage-without-outcome/rule.ts';
 import { rule as dropWithoutDose } from './rules/drop-without-dose/rule.ts';
+import { rule as earlierSurgeryOnOtherEyeOnly } from './rules/earlier-surgery-on-other-eye-only/rule.ts';
 import { rule as elementOfImpossibleSize } from './rules/element-of-impossible-size/rule.ts';
 import { rule as elementWithoutFixation } from './rules/element-without-fixation/rule.ts';
 import { rule as elementWithoutFrontEdge } from './rules/element-without-front-edge/rule.ts';
@@ -43,6 +53,7 @@ import { rule as endsBeforeStart } from './rules/ends-before-start/rule.ts';
 import { rule as expansileConcentration } from './rules/expansile-concentration/rule.ts';
 import { rule as expiredImplant } from './rules/expired-implant/rule.ts';
 import { rule as extentAgainstQuadrants } from './rules/extent-against-quadrants/rule.ts';
+import { rule as extentHalfRecorded } from './rules/extent-half-recorded/rule.ts';
 import { rule as fixedDateForFlying } from './rules/fixed-date-for-flying/rule.ts';
 import { rule as fluidAgainstFlat } from './rules/fluid-against-flat/rule.ts';
 import { rule as flyingBeforeGasGone } from './rules/flying-before-gas-gone/rule.ts';
@@ -73,11 +84,15 @@ import { rule as lensWorkAgainstLens } from './rules/lens-work-against-lens/rule
 import { rule as lincoffRule } from './rules/lincoff-rule/rule.ts';
 import { rule as lowerBreaksLightTamponadeUpright } from './rules/lower-breaks-light-tamponade-upright/rule.ts';
 import { rule as maculaOffBeforeSymptoms } from './rules/macula-off-before-symptoms/rule.ts';
+import { rule as maculaOffDurationMissing } from './rules/macula-off-duration-missing/rule.ts';
 import { rule as maculaOnForDaysOff } from './rules/macula-on-for-days-off/rule.ts';
+import { rule as macularHoleInPeriphery } from './rules/macular-hole-in-periphery/rule.ts';
+import { rule as markNotRecorded } from './rules/mark-not-recorded/rule.ts';
 import { rule as measuredBloodLossMissing } from './rules/measured-blood-loss-missing/rule.ts';
 import { rule as medicineGivenOutsideOperation } from './rules/medicine-given-outside-operation/rule.ts';
 import { rule as musclesAgainstBand } from './rules/muscles-against-band/rule.ts';
 import { rule as nitrousOxideAndGas } from './rules/nitrous-oxide-and-gas/rule.ts';
+import { rule as nitrousOxideStoppedOutsideOperation } from './rules/nitrous-oxide-stopped-outside-operation/rule.ts';
 import { rule as nitrousOxideToTheEnd } from './rules/nitrous-oxide-to-the-end/rule.ts';
 import { rule as oilInAphakicEye } from './rules/oil-in-aphakic-eye/rule.ts';
 import { rule as oilWithoutRemovalPlan } from './rules/oil-without-removal-plan/rule.ts';
@@ -95,10 +110,16 @@ import { rule as postureOnWrongSide } from './rules/posture-on-wrong-side/rule.t
 import { rule as postureWithoutDuration } from './rules/posture-without-duration/rule.ts';
 import { rule as preoperativeDiagnosisNotBorneOut } from './rules/preoperative-diagnosis-not-borne-out/rule.ts';
 import { rule as pressureAtEnd } from './rules/pressure-at-end/rule.ts';
+import { rule as pseudophakicWithoutCataractSurgery } from './rules/pseudophakic-without-cataract-surgery/rule.ts';
 import { rule as pureGasAtFullFill } from './rules/pure-gas-at-full-fill/rule.ts';
+import { rule as pvrDWithoutTotalDetachment } from './rules/pvr-d-without-total-detachment/rule.ts';
 import { rule as pvrExtentMissing } from './rules/pvr-extent-missing/rule.ts';
 import { rule as pvrGradeOfOtherEdition } from './rules/pvr-grade-of-other-edition/rule.ts';
+import { rule as pvrHoursWithoutGradeC } from './rules/pvr-hours-without-grade-c/rule.ts';
+import { rule as pvrMembranesWithoutPvr } from './rules/pvr-membranes-without-pvr/rule.ts';
 import { rule as referrerMissing } from './rules/referrer-missing/rule.ts';
+import { rule as referrerWithoutName } from './rules/referrer-without-name/rule.ts';
+import { rule as refractionAgainstAxialLength } from './rules/refraction-against-axial-length/rule.ts';
 import { rule as refractionNotTold } from './rules/refraction-not-told/rule.ts';
 import { rule as requiredAftercare } from './rules/required-aftercare/rule.ts';
 import { rule as requiredAnaesthesia } from './rules/required-anaesthesia/rule.ts';
@@ -117,29 +138,36 @@ import { rule as shortenedTooMuch } from './rules/shortened-too-much/rule.ts';
 import { rule as sideDiffers } from './rules/side-differs/rule.ts';
 import { rule as smallHyperopicEye } from './rules/small-hyperopic-eye/rule.ts';
 import { rule as steroidAndAntibioticMissing } from './rules/steroid-and-antibiotic-missing/rule.ts';
+import { rule as supervisionIncomplete } from './rules/supervision-incomplete/rule.ts';
 import { rule as supervisorForTrainee } from './rules/supervisor-for-trainee/rule.ts';
 import { rule as supportMissesBreak } from './rules/support-misses-break/rule.ts';
 import { rule as supportNotRecorded } from './rules/support-not-recorded/rule.ts';
 import { rule as supportedByMissingElement } from './rules/supported-by-missing-element/rule.ts';
+import { rule as symptomsForYears } from './rules/symptoms-for-years/rule.ts';
 import { rule as tamponadeDetailsWithoutAgent } from './rules/tamponade-details-without-agent/rule.ts';
 import { rule as temporaryClosurePermanentBand } from './rules/temporary-closure-permanent-band/rule.ts';
 import { rule as tensionAboveClosingPressure } from './rules/tension-above-closing-pressure/rule.ts';
 import { rule as tightenedWithoutPressure } from './rules/tightened-without-pressure/rule.ts';
 import { rule as timeOutAfterStart } from './rules/time-out-after-start/rule.ts';
+import { rule as timeOutNotTimed } from './rules/time-out-not-timed/rule.ts';
 import { rule as totalDetachmentMaculaOn } from './rules/total-detachment-macula-on/rule.ts';
+import { rule as traineeWithoutSupervisor } from './rules/trainee-without-supervisor/rule.ts';
 import { rule as treatmentForOtherEye } from './rules/treatment-for-other-eye/rule.ts';
 import { rule as vitrectomyDetailsWithoutVitrectomy } from './rules/vitrectomy-details-without-vitrectomy/rule.ts';
 
 /** Changes whenever a rule comes, goes or asks something else; kept with every signature. */
-export const RULES_VERSION = '2026-12-01';
+export const RULES_VERSION = '2026-12-02';
 
 /** Every rule, by id. A test holds this list against the folders. */
 export const rules: readonly Rule[] = [
   absorbableFixation,
+  acuityAgainstMacula,
   agentExchangeMismatch,
   allergyAgainstMedicine,
   anaesthetistMissing,
+  assistantWithoutPart,
   axialLengthFromBeforeBand,
+  axialLengthUnusual,
   bandDoesNotFitGlobe,
   bandFarFromUsualPlace,
   bandFixedInFewQuadrants,
@@ -150,10 +178,15 @@ export const rules: readonly Rule[] = [
   blockAgainstAnaesthesia,
   blockEyeMissing,
   bornAfterSurgery,
+  breakAsLargeAsGiantTear,
   breakEdgesCrossed,
+  breakEnteredTwice,
   breakOffItsZone,
+  breakOffTheDetachment,
+  breakOffTheRetina,
   breakUnsupported,
   breakWithoutRetinopexy,
+  breaksInSerousDetachment,
   broadElementInOlderPatient,
   buckleWithoutOpening,
   cephalosporinAfterPenicillinAllergy,
@@ -165,12 +198,14 @@ export const rules: readonly Rule[] = [
   detachmentSurgeryRepeated,
   detachmentWithoutDetachment,
   diagnosisAgainstBreaks,
+  dialysisOffTheOra,
   dilutionWrong,
   discNotPerfusedUnresolved,
   drainageDetailsWithoutDrainage,
   drainageRetinotomyMissing,
   drainageWithoutOutcome,
   dropWithoutDose,
+  earlierSurgeryOnOtherEyeOnly,
   elementOfImpossibleSize,
   elementWithoutFixation,
   elementWithoutFrontEdge,
@@ -179,6 +214,7 @@ export const rules: readonly Rule[] = [
   expansileConcentration,
   expiredImplant,
   extentAgainstQuadrants,
+  extentHalfRecorded,
   fixedDateForFlying,
   fluidAgainstFlat,
   flyingBeforeGasGone,
@@ -209,11 +245,15 @@ export const rules: readonly Rule[] = [
   lincoffRule,
   lowerBreaksLightTamponadeUpright,
   maculaOffBeforeSymptoms,
+  maculaOffDurationMissing,
   maculaOnForDaysOff,
+  macularHoleInPeriphery,
+  markNotRecorded,
   measuredBloodLossMissing,
   medicineGivenOutsideOperation,
   musclesAgainstBand,
   nitrousOxideAndGas,
+  nitrousOxideStoppedOutsideOperation,
   nitrousOxideToTheEnd,
   oilInAphakicEye,
   oilWithoutRemovalPlan,
@@ -231,10 +271,16 @@ export const rules: readonly Rule[] = [
   postureWithoutDuration,
   preoperativeDiagnosisNotBorneOut,
   pressureAtEnd,
+  pseudophakicWithoutCataractSurgery,
   pureGasAtFullFill,
+  pvrDWithoutTotalDetachment,
   pvrExtentMissing,
   pvrGradeOfOtherEdition,
+  pvrHoursWithoutGradeC,
+  pvrMembranesWithoutPvr,
   referrerMissing,
+  referrerWithoutName,
+  refractionAgainstAxialLength,
   refractionNotTold,
   requiredAftercare,
   requiredAnaesthesia,
@@ -253,16 +299,20 @@ export const rules: readonly Rule[] = [
   sideDiffers,
   smallHyperopicEye,
   steroidAndAntibioticMissing,
+  supervisionIncomplete,
   supervisorForTrainee,
   supportMissesBreak,
   supportNotRecorded,
   supportedByMissingElement,
+  symptomsForYears,
   tamponadeDetailsWithoutAgent,
   temporaryClosurePermanentBand,
   tensionAboveClosingPressure,
   tightenedWithoutPressure,
   timeOutAfterStart,
+  timeOutNotTimed,
   totalDetachmentMaculaOn,
+  traineeWithoutSupervisor,
   treatmentForOtherEye,
   vitrectomyDetailsWithoutVitrectomy,
 ];

@@ -1,0 +1,269 @@
+import { readFileSync } from 'node:fs';
+import pg from 'pg';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import type { CaseRecord } from '../../src/domain/record/schema.ts';
+import { createTestDatabase, type TestDatabase } from '../support/database.ts';
+import { type Person, signInAs } from '../support/person.ts';
+import { startServer, type TestServer } from '../support/server.ts';
+
+let database: TestDatabase;
+let server: TestServer;
+let owner: pg.Client;
+let app: pg.Client;
+let surgeon: Person;
+let secretary: Person;
+
+const fixture = (): CaseRecord => ({
+  ...JSON.parse(readFileSync(new URL('../fixtures/vitrectomy-with-gas.json', import.meta.url), 'utf8')),
+});
+const emptySheet = { title: 'Operative note', sections: [] };
+const password = 'demonstration-surgeon';
+
+const caseAt = async (position: number): Promise<string> => {
+  const { rows } = await owner.query('select id from cases where position = $1', [position]);
+  return rows[0].id;
+};
+
+const sign = (id: string, revision: number, typed = password) =>
+  surgeon.send('POST', `/api/cases/${id}/sign`, { password: typed, meaning: 'author' }, revision);
+
+const until = async (holds: () => Promise<boolean>): Promise<void> => {
+  const limit = Date.now() + 25_000;
+  while (!(await holds())) {
+    if (Date.now() > limit) throw new Error('This did not happen in time.');
+    await new Promise((resolve) => setTimeout(resolve, 200));
+  }
+};
+
+beforeAll(async () => {
+  database = await createTestDatabase({ demonstration: true });
+  server = await startServer({
+    database,
+    instances: 2,
+    refuse: (address) => (address.startsWith('bram') ? { code: 550, message: 'no such person' } : undefined),
+  });
+  owner = new pg.Client({ connectionString: database.ownerUrl });
+  app = new pg.Client({ connectionString: database.url });
+  await Promise.all([owner.connect(), app.connect()]);
+  [surgeon, secretary] = await Promise.all([
+    signInAs(server.url, 'surgeon'),
+    signInAs(server.url, 'secretary'),
+  ]);
+});
+
+afterAll(async () => {
+  await Promise.all([owner?.end(), app?.end()]);
+  await server?.stop();
+  await database?.drop();
+});
+
+describe('saving', () => {
+  it('keeps both when two people save upon the same revision', async () => {
+    const id = await caseAt(5);
+    const save = (given: string) =>
+      surgeon.send(
+        'PUT',
+        `/api/cases/${id}`,
+        { record: { version: 1, who: { theatre: given } }, sheet: emptySheet, answers: [] },
+        1,
+      );
+    const answers = await Promise.all([save('One'), save('Two')]);
+    expect(answers.map(({ status }) => status).sort()).toEqual([200, 412]);
+    const lost = answers.find(({ status }) => status === 412);
+    expect(await lost?.json()).toMatchObject({ code: 'stale', current: { revision: 2 } });
+    const { rows } = await owner.query(
+      'select count(*)::int as kept from case_revisions where case_id = $1',
+      [id],
+    );
+    expect(rows[0].kept).toBe(2);
+  });
+
+  it('says where a record does not fit, and asks for the revision', async () => {
+    const id = await caseAt(4);
+    const wrong = { record: { version: 1, who: { eye: 'both' } }, sheet: emptySheet, answers: [] };
+    const refused = await surgeon.send('PUT', `/api/cases/${id}`, wrong, 1);
+    expect(refused.status).toBe(422);
+    expect(await refused.json()).toMatchObject({ code: 'invalid', issues: [{ path: 'record.who.eye' }] });
+    expect((await surgeon.send('PUT', `/api/cases/${id}`, wrong)).status).toBe(428);
+  });
+});
+
+describe('signing', () => {
+  it('is refused while a contradiction stands, and with a wrong password', async () => {
+    const id = await caseAt(3);
+    const record = fixture();
+    const twisted = {
+      ...record,
+      who: { ...record.who, consentEye: record.who?.eye === 'left' ? 'right' : 'left' },
+    };
+    await surgeon.send('PUT', `/api/cases/${id}`, { record: twisted, sheet: emptySheet, answers: [] }, 1);
+    const blocked = await sign(id, 2);
+    expect(blocked.status).toBe(409);
+    expect(await blocked.json()).toMatchObject({ code: 'blocked', flags: [{ rule: 'side-differs' }] });
+    expect((await sign(id, 2, 'wrong')).status).toBe(401);
+  });
+
+  it('freezes the note in one step, and nobody can change it afterwards', async () => {
+    const id = await caseAt(2);
+    const record = fixture();
+    const named = {
+      ...record,
+      who: { ...record.who, referrer: { name: 'Fern Mossgrove', kind: 'optometrist' as const } },
+    };
+    await surgeon.send('PUT', `/api/cases/${id}`, { record: named, sheet: emptySheet, answers: [] }, 1);
+    expect((await sign(id, 1)).status).toBe(412);
+    const signed = await sign(id, 2);
+    expect(signed.status).toBe(200);
+    expect(await signed.json()).toMatchObject({
+      version: 1,
+      verificationCode: expect.stringMatching(/^(\w{3}-){3}\w{3}$/),
+    });
+    expect((await sign(id, 2)).status).toBe(409);
+    expect(
+      (await surgeon.send('PUT', `/api/cases/${id}`, { record: named, sheet: emptySheet, answers: [] }, 2))
+        .status,
+    ).toBe(409);
+
+    const refused = { code: '42501' };
+    for (const client of [app, owner]) {
+      await expect(client.query("update signed_versions set sha256 = 'x'")).rejects.toMatchObject(refused);
+      await expect(client.query('delete from signed_versions')).rejects.toMatchObject(refused);
+      await expect(client.query("update audit_log set action = 'x'")).rejects.toMatchObject(refused);
+      await expect(client.query('delete from case_revisions')).rejects.toMatchObject(refused);
+      await expect(client.query("update cases set record = '{}' where id = $1", [id])).rejects.toMatchObject(
+        refused,
+      );
+    }
+    await expect(owner.query('truncate audit_log')).rejects.toMatchObject(refused);
+  });
+
+  it('is proved on the spot, and a change behind the guards is seen', async () => {
+    const auditor = await signInAs(server.url, 'auditor');
+    const { rows } = await owner.query('select id from signed_versions');
+    const page = async () => (await auditor.get(`/auditing/${rows[0].id}`)).text();
+    expect(await page()).toContain('This is what was signed');
+    await owner.query('alter table audit_log disable trigger all');
+    await owner.query("update audit_log set action = 'nothing' where position = 2");
+    expect(await page()).toContain('DOES NOT HOLD');
+    await owner.query("update audit_log set action = 'person:signed-in' where position = 2");
+    await owner.query('alter table audit_log enable trigger all');
+  });
+
+  it('logs that a note was read', async () => {
+    const { rows } = await owner.query(
+      "select count(*)::int as reads from audit_log where action = 'note:read'",
+    );
+    expect(rows[0].reads).toBeGreaterThan(0);
+  });
+});
+
+describe('letters', () => {
+  const letterOf = async (kind: string): Promise<{ id: string; revision: number; sheet: unknown }> => {
+    const { rows } = await owner.query('select id, revision, sheet from letters where kind = $1', [kind]);
+    return rows[0];
+  };
+  const readerId = async (name: string): Promise<string> => {
+    const { rows } = await owner.query('select id from recipients where name = $1', [name]);
+    return rows[0].id;
+  };
+  const stateOf = async (id: string) => {
+    const { rows } = await owner.query('select state, last_error from letters where id = $1', [id]);
+    return rows[0];
+  };
+
+  it('go nowhere without a confirmed reader, and not with words against the note', async () => {
+    const { id, revision, sheet } = await letterOf('referring-doctor');
+    expect(
+      await (await secretary.send('POST', `/api/letters/${id}/send`, {}, revision)).json(),
+    ).toMatchObject({ code: 'no-recipient' });
+    const unconfirmed = await readerId('Dr Perrin Alderbank');
+    await secretary.send('PUT', `/api/letters/${id}`, { sheet, recipientId: unconfirmed }, revision);
+    expect(
+      await (await secretary.send('POST', `/api/letters/${id}/send`, {}, revision + 1)).json(),
+    ).toMatchObject({ code: 'not-confirmed' });
+    const wrong = {
+      title: 'Letter',
+      sections: [
+        {
+          id: 's',
+          heading: 'S',
+          statements: [
+            {
+              id: 'x',
+              origin: 'own',
+              text: 'Surgery to the right eye. Surgery to the left eye.',
+              drafted: '',
+              reads: [],
+            },
+          ],
+        },
+      ],
+    };
+    const fern = await readerId('Fern Mossgrove');
+    await secretary.send('PUT', `/api/letters/${id}`, { sheet: wrong, recipientId: fern }, revision + 1);
+    expect(
+      await (await secretary.send('POST', `/api/letters/${id}/send`, {}, revision + 2)).json(),
+    ).toMatchObject({ code: 'denied' });
+    expect(
+      (await secretary.send('PUT', `/api/letters/${id}`, { sheet, recipientId: fern }, revision + 2)).status,
+    ).toBe(200);
+  });
+
+  it('arrive once, with one Message-ID, without patient data in subject or file name', async () => {
+    const { id, revision } = await letterOf('referring-doctor');
+    const twice = await Promise.all([
+      secretary.send('POST', `/api/letters/${id}/send`, {}, revision),
+      secretary.send('POST', `/api/letters/${id}/send`, {}, revision),
+    ]);
+    expect(twice.map(({ status }) => status).sort()).toEqual([200, 409]);
+    await until(async () => (await stateOf(id)).state === 'sent');
+    const messages = server.messages();
+    expect(messages).toHaveLength(1);
+    const { rows } = await owner.query('select message_id from letters where id = $1', [id]);
+    expect(messages[0]).toContain(`Message-ID: ${rows[0].message_id}`);
+    const head = messages[0]?.slice(0, messages[0].indexOf('base64')) ?? '';
+    const patient = fixture().who?.patient;
+    for (const secret of [patient?.familyName, patient?.givenName, patient?.number])
+      expect(head).not.toContain(secret);
+    expect(head).toContain('Subject: Letter from Larkfield Eye Unit');
+  });
+
+  it('come back to the desk with a reason when they are refused', async () => {
+    const { id, revision, sheet } = await letterOf('patient');
+    await secretary.send(
+      'PUT',
+      `/api/letters/${id}`,
+      { sheet, recipientId: await readerId('Bram Larkwood') },
+      revision,
+    );
+    await secretary.send('POST', `/api/letters/${id}/send`, {}, revision + 1);
+    await until(async () => (await stateOf(id)).state === 'failed');
+    expect((await stateOf(id)).last_error).toContain('Check the address');
+  });
+});
+
+describe('two processes', () => {
+  it('share sessions and what was saved', async () => {
+    const [, second = ''] = server.urls;
+    const there = await signInAs(second, 'surgeon');
+    const id = await caseAt(4);
+    const saved = await surgeon.send(
+      'PUT',
+      `/api/cases/${id}`,
+      { record: { version: 1, who: { theatre: 'Here' } }, sheet: emptySheet, answers: [] },
+      1,
+    );
+    expect(saved.status).toBe(200);
+    expect(await (await there.get(`/api/cases/${id}`)).json()).toMatchObject({
+      revision: 2,
+      record: { who: { theatre: 'Here' } },
+    });
+  });
+});
+
+it('prints no patient data in its log', () => {
+  const patient = fixture().who?.patient;
+  for (const secret of ['Oakhollow', 'Quillfeather', patient?.familyName ?? 'x', patient?.number ?? 'x']) {
+    expect(server.output()).not.toContain(secret);
+  }
+});
