@@ -4,6 +4,7 @@ import { rule as acuityAgainstMacula } from './rules/acuity-against-macula/rule.
 import { rule as agentExchangeMismatch } from './rules/agent-exchange-mismatch/rule.ts';
 import { rule as allergyAgainstMedicine } from './rules/allergy-against-medicine/rule.ts';
 import { rule as anaesthetistMissing } from './rules/anaesthetist-missing/rule.ts';
+import { rule as arcAgainstRole } from './rules/arc-against-role/rule.ts';
 import { rule as assistantWithoutPart } from './rules/assistant-without-part/rule.ts';
 import { rule as axialLengthFromBeforeBand } from './rules/axial-length-from-before-band/rule.ts';
 import { rule as axialLengthUnusual } from './rules/axial-length-unusual/rule.ts';
@@ -11,6 +12,8 @@ import { rule as bandDoesNotFitGlobe } from './rules/band-does-not-fit-globe/rul
 import { rule as bandFarFromUsualPlace } from './rules/band-far-from-usual-place/rule.ts';
 import { rule as bandFixedInFewQuadrants } from './rules/band-fixed-in-few-quadrants/rule.ts';
 import { rule as bandMayBeTwisted } from './rules/band-may-be-twisted/rule.ts';
+import { rule as bandSetOnSoftEye } from './rules/band-set-on-soft-eye/rule.ts';
+import { rule as bandThroughLimitedOpening } from './rules/band-through-limited-opening/rule.ts';
 import { rule as bandWithoutClosure } from './rules/band-without-closure/rule.ts';
 import { rule as biteNarrowerThanElement } from './rules/bite-narrower-than-element/rule.ts';
 import { rule as bleedingRiskExternalDrainage } from './rules/bleeding-risk-external-drainage/rule.ts';
@@ -30,8 +33,12 @@ import { rule as broadElementInOlderPatient } from './rules/broad-element-in-old
 import { rule as buckleWithoutOpening } from './rules/buckle-without-opening/rule.ts';
 import { rule as cephalosporinAfterPenicillinAllergy } from './rules/cephalosporin-after-penicillin-allergy/rule.ts';
 import { rule as clockOutsideQuadrant } from './rules/clock-outside-quadrant/rule.ts';
+import { rule as closureMaterialAgainstKind } from './rules/closure-material-against-kind/rule.ts';
+import { rule as closureMaterialMissing } from './rules/closure-material-missing/rule.ts';
+import { rule as closureOnOpenElement } from './rules/closure-on-open-element/rule.ts';
 import { rule as complicationWithoutAction } from './rules/complication-without-action/rule.ts';
 import { rule as complicationsAgainstOutcome } from './rules/complications-against-outcome/rule.ts';
+import { rule as conjunctivaOpenedNotClosed } from './rules/conjunctiva-opened-not-closed/rule.ts';
 import { rule as countDiscrepancyOpen } from './rules/count-discrepancy-open/rule.ts';
 import { rule as dateOutOfOrder } from './rules/date-out-of-order/rule.ts';
 import { rule as detachmentSurgeryRepeated } from './rules/detachment-surgery-repeated/rule.ts';
@@ -39,26 +46,33 @@ import { rule as detachmentWithoutDetachment } from './rules/detachment-without-
 import { rule as diagnosisAgainstBreaks } from './rules/diagnosis-against-breaks/rule.ts';
 import { rule as dialysisOffTheOra } from './rules/dialysis-off-the-ora/rule.ts';
 import { rule as dilutionWrong } from './rules/dilution-wrong/rule.ts';
+import { rule as discNotPerfusedAtEnd } from './rules/disc-not-perfused-at-end/rule.ts';
 import { rule as discNotPerfusedUnresolved } from './rules/disc-not-perfused-unresolved/rule.ts';
 import { rule as drainageDetailsWithoutDrainage } from './rules/drainage-details-without-drainage/rule.ts';
 import { rule as drainageRetinotomyMissing } from './rules/drainage-retinotomy-missing/rule.ts';
 import { rule as drainageWithoutOutcome } from './rules/drainage-without-outcome/rule.ts';
 import { rule as dropWithoutDose } from './rules/drop-without-dose/rule.ts';
 import { rule as earlierSurgeryOnOtherEyeOnly } from './rules/earlier-surgery-on-other-eye-only/rule.ts';
+import { rule as elementAwayFromBreak } from './rules/element-away-from-break/rule.ts';
+import { rule as elementFixedByNothing } from './rules/element-fixed-by-nothing/rule.ts';
 import { rule as elementOfImpossibleSize } from './rules/element-of-impossible-size/rule.ts';
 import { rule as elementWithoutFixation } from './rules/element-without-fixation/rule.ts';
 import { rule as elementWithoutFrontEdge } from './rules/element-without-front-edge/rule.ts';
+import { rule as elementWithoutPlace } from './rules/element-without-place/rule.ts';
 import { rule as elementWithoutSize } from './rules/element-without-size/rule.ts';
 import { rule as endsBeforeStart } from './rules/ends-before-start/rule.ts';
 import { rule as expansileConcentration } from './rules/expansile-concentration/rule.ts';
 import { rule as expiredImplant } from './rules/expired-implant/rule.ts';
 import { rule as extentAgainstQuadrants } from './rules/extent-against-quadrants/rule.ts';
 import { rule as extentHalfRecorded } from './rules/extent-half-recorded/rule.ts';
+import { rule as fixationIncomplete } from './rules/fixation-incomplete/rule.ts';
+import { rule as fixationOffTheElement } from './rules/fixation-off-the-element/rule.ts';
 import { rule as fixedDateForFlying } from './rules/fixed-date-for-flying/rule.ts';
 import { rule as fluidAgainstFlat } from './rules/fluid-against-flat/rule.ts';
 import { rule as flyingBeforeGasGone } from './rules/flying-before-gas-gone/rule.ts';
 import { rule as followUpBeforeSurgery } from './rules/follow-up-before-surgery/rule.ts';
 import { rule as formAgainstMaterial } from './rules/form-against-material/rule.ts';
+import { rule as frontEdgeInFrontOfInsertions } from './rules/front-edge-in-front-of-insertions/rule.ts';
 import { rule as gasAdviceMissing } from './rules/gas-advice-missing/rule.ts';
 import { rule as gasAdviceNotGiven } from './rules/gas-advice-not-given/rule.ts';
 import { rule as gasAdviceWithoutGas } from './rules/gas-advice-without-gas/rule.ts';
@@ -70,6 +84,7 @@ import { rule as heavyLiquidLeft } from './rules/heavy-liquid-left/rule.ts';
 import { rule as heavyLiquidUseNotRecorded } from './rules/heavy-liquid-use-not-recorded/rule.ts';
 import { rule as heavyOilFaceDown } from './rules/heavy-oil-face-down/rule.ts';
 import { rule as heightAboveBound } from './rules/height-above-bound/rule.ts';
+import { rule as highPressureWithoutPerfusion } from './rules/high-pressure-without-perfusion/rule.ts';
 import { rule as horseshoeWithVitreousAttached } from './rules/horseshoe-with-vitreous-attached/rule.ts';
 import { rule as hyaloidAgainstBefore } from './rules/hyaloid-against-before/rule.ts';
 import { rule as implantPowerMissing } from './rules/implant-power-missing/rule.ts';
@@ -90,6 +105,7 @@ import { rule as macularHoleInPeriphery } from './rules/macular-hole-in-peripher
 import { rule as markNotRecorded } from './rules/mark-not-recorded/rule.ts';
 import { rule as measuredBloodLossMissing } from './rules/measured-blood-loss-missing/rule.ts';
 import { rule as medicineGivenOutsideOperation } from './rules/medicine-given-outside-operation/rule.ts';
+import { rule as muscleOffTheSegment } from './rules/muscle-off-the-segment/rule.ts';
 import { rule as musclesAgainstBand } from './rules/muscles-against-band/rule.ts';
 import { rule as nitrousOxideAndGas } from './rules/nitrous-oxide-and-gas/rule.ts';
 import { rule as nitrousOxideStoppedOutsideOperation } from './rules/nitrous-oxide-stopped-outside-operation/rule.ts';
@@ -98,6 +114,7 @@ import { rule as oilInAphakicEye } from './rules/oil-in-aphakic-eye/rule.ts';
 import { rule as oilWithoutRemovalPlan } from './rules/oil-without-removal-plan/rule.ts';
 import { rule as oilWithoutViscosity } from './rules/oil-without-viscosity/rule.ts';
 import { rule as onePersonInTwoRoles } from './rules/one-person-in-two-roles/rule.ts';
+import { rule as openingAndClosureMissing } from './rules/opening-and-closure-missing/rule.ts';
 import { rule as performedAgainstStages } from './rules/performed-against-stages/rule.ts';
 import { rule as perfusionNotRecorded } from './rules/perfusion-not-recorded/rule.ts';
 import { rule as planChangedWithoutReason } from './rules/plan-changed-without-reason/rule.ts';
@@ -121,6 +138,7 @@ import { rule as referrerMissing } from './rules/referrer-missing/rule.ts';
 import { rule as referrerWithoutName } from './rules/referrer-without-name/rule.ts';
 import { rule as refractionAgainstAxialLength } from './rules/refraction-against-axial-length/rule.ts';
 import { rule as refractionNotTold } from './rules/refraction-not-told/rule.ts';
+import { rule as removalPlannedOfPermanentElement } from './rules/removal-planned-of-permanent-element/rule.ts';
 import { rule as requiredAftercare } from './rules/required-aftercare/rule.ts';
 import { rule as requiredAnaesthesia } from './rules/required-anaesthesia/rule.ts';
 import { rule as requiredBefore } from './rules/required-before/rule.ts';
@@ -133,8 +151,11 @@ import { rule as retinopexyOfMissingBreak } from './rules/retinopexy-of-missing-
 import { rule as retinotomyUntreated } from './rules/retinotomy-untreated/rule.ts';
 import { rule as reviewDatesDiffer } from './rules/review-dates-differ/rule.ts';
 import { rule as sclerotomiesOffParsPlana } from './rules/sclerotomies-off-pars-plana/rule.ts';
+import { rule as segmentFarFromUsualPlace } from './rules/segment-far-from-usual-place/rule.ts';
+import { rule as segmentLengthAgainstArc } from './rules/segment-length-against-arc/rule.ts';
 import { rule as segmentOverHalf } from './rules/segment-over-half/rule.ts';
 import { rule as shortenedTooMuch } from './rules/shortened-too-much/rule.ts';
+import { rule as shortenedWithoutRing } from './rules/shortened-without-ring/rule.ts';
 import { rule as sideDiffers } from './rules/side-differs/rule.ts';
 import { rule as smallHyperopicEye } from './rules/small-hyperopic-eye/rule.ts';
 import { rule as steroidAndAntibioticMissing } from './rules/steroid-and-antibiotic-missing/rule.ts';
@@ -146,13 +167,17 @@ import { rule as supportedByMissingElement } from './rules/supported-by-missing-
 import { rule as symptomsForYears } from './rules/symptoms-for-years/rule.ts';
 import { rule as tamponadeDetailsWithoutAgent } from './rules/tamponade-details-without-agent/rule.ts';
 import { rule as temporaryClosurePermanentBand } from './rules/temporary-closure-permanent-band/rule.ts';
+import { rule as temporaryElementWithoutRemovalPlan } from './rules/temporary-element-without-removal-plan/rule.ts';
 import { rule as tensionAboveClosingPressure } from './rules/tension-above-closing-pressure/rule.ts';
+import { rule as thickerThanItsForm } from './rules/thicker-than-its-form/rule.ts';
 import { rule as tightenedWithoutPressure } from './rules/tightened-without-pressure/rule.ts';
 import { rule as timeOutAfterStart } from './rules/time-out-after-start/rule.ts';
 import { rule as timeOutNotTimed } from './rules/time-out-not-timed/rule.ts';
 import { rule as totalDetachmentMaculaOn } from './rules/total-detachment-macula-on/rule.ts';
 import { rule as traineeWithoutSupervisor } from './rules/trainee-without-supervisor/rule.ts';
 import { rule as treatmentForOtherEye } from './rules/treatment-for-other-eye/rule.ts';
+import { rule as twoBands } from './rules/two-bands/rule.ts';
+import { rule as underBandWithoutBand } from './rules/under-band-without-band/rule.ts';
 import { rule as vitrectomyDetailsWithoutVitrectomy } from './rules/vitrectomy-details-without-vitrectomy/rule.ts';
 
 /** Changes whenever a rule comes, goes or asks something else; kept with every signature. */
@@ -165,6 +190,7 @@ export const rules: readonly Rule[] = [
   agentExchangeMismatch,
   allergyAgainstMedicine,
   anaesthetistMissing,
+  arcAgainstRole,
   assistantWithoutPart,
   axialLengthFromBeforeBand,
   axialLengthUnusual,
@@ -172,6 +198,8 @@ export const rules: readonly Rule[] = [
   bandFarFromUsualPlace,
   bandFixedInFewQuadrants,
   bandMayBeTwisted,
+  bandSetOnSoftEye,
+  bandThroughLimitedOpening,
   bandWithoutClosure,
   biteNarrowerThanElement,
   bleedingRiskExternalDrainage,
@@ -191,8 +219,12 @@ export const rules: readonly Rule[] = [
   buckleWithoutOpening,
   cephalosporinAfterPenicillinAllergy,
   clockOutsideQuadrant,
+  closureMaterialAgainstKind,
+  closureMaterialMissing,
+  closureOnOpenElement,
   complicationWithoutAction,
   complicationsAgainstOutcome,
+  conjunctivaOpenedNotClosed,
   countDiscrepancyOpen,
   dateOutOfOrder,
   detachmentSurgeryRepeated,
@@ -200,26 +232,33 @@ export const rules: readonly Rule[] = [
   diagnosisAgainstBreaks,
   dialysisOffTheOra,
   dilutionWrong,
+  discNotPerfusedAtEnd,
   discNotPerfusedUnresolved,
   drainageDetailsWithoutDrainage,
   drainageRetinotomyMissing,
   drainageWithoutOutcome,
   dropWithoutDose,
   earlierSurgeryOnOtherEyeOnly,
+  elementAwayFromBreak,
+  elementFixedByNothing,
   elementOfImpossibleSize,
   elementWithoutFixation,
   elementWithoutFrontEdge,
+  elementWithoutPlace,
   elementWithoutSize,
   endsBeforeStart,
   expansileConcentration,
   expiredImplant,
   extentAgainstQuadrants,
   extentHalfRecorded,
+  fixationIncomplete,
+  fixationOffTheElement,
   fixedDateForFlying,
   fluidAgainstFlat,
   flyingBeforeGasGone,
   followUpBeforeSurgery,
   formAgainstMaterial,
+  frontEdgeInFrontOfInsertions,
   gasAdviceMissing,
   gasAdviceNotGiven,
   gasAdviceWithoutGas,
@@ -231,6 +270,7 @@ export const rules: readonly Rule[] = [
   heavyLiquidUseNotRecorded,
   heavyOilFaceDown,
   heightAboveBound,
+  highPressureWithoutPerfusion,
   horseshoeWithVitreousAttached,
   hyaloidAgainstBefore,
   implantPowerMissing,
@@ -251,6 +291,7 @@ export const rules: readonly Rule[] = [
   markNotRecorded,
   measuredBloodLossMissing,
   medicineGivenOutsideOperation,
+  muscleOffTheSegment,
   musclesAgainstBand,
   nitrousOxideAndGas,
   nitrousOxideStoppedOutsideOperation,
@@ -259,6 +300,7 @@ export const rules: readonly Rule[] = [
   oilWithoutRemovalPlan,
   oilWithoutViscosity,
   onePersonInTwoRoles,
+  openingAndClosureMissing,
   performedAgainstStages,
   perfusionNotRecorded,
   planChangedWithoutReason,
@@ -282,6 +324,7 @@ export const rules: readonly Rule[] = [
   referrerWithoutName,
   refractionAgainstAxialLength,
   refractionNotTold,
+  removalPlannedOfPermanentElement,
   requiredAftercare,
   requiredAnaesthesia,
   requiredBefore,
@@ -294,8 +337,11 @@ export const rules: readonly Rule[] = [
   retinotomyUntreated,
   reviewDatesDiffer,
   sclerotomiesOffParsPlana,
+  segmentFarFromUsualPlace,
+  segmentLengthAgainstArc,
   segmentOverHalf,
   shortenedTooMuch,
+  shortenedWithoutRing,
   sideDiffers,
   smallHyperopicEye,
   steroidAndAntibioticMissing,
@@ -307,12 +353,16 @@ export const rules: readonly Rule[] = [
   symptomsForYears,
   tamponadeDetailsWithoutAgent,
   temporaryClosurePermanentBand,
+  temporaryElementWithoutRemovalPlan,
   tensionAboveClosingPressure,
+  thickerThanItsForm,
   tightenedWithoutPressure,
   timeOutAfterStart,
   timeOutNotTimed,
   totalDetachmentMaculaOn,
   traineeWithoutSupervisor,
   treatmentForOtherEye,
+  twoBands,
+  underBandWithoutBand,
   vitrectomyDetailsWithoutVitrectomy,
 ];

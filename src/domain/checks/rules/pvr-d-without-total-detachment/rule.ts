@@ -10,15 +10,11 @@ export const rule = defineRule({
   why: 'Grade D means fixed folds in all four quadrants.',
   source: { text: 'Retina Society 1983: D, folds in four quadrants', certainty: 'M' },
   answerable: false,
+  unless: ['extent-against-quadrants'],
   check: ({ before }) => {
     const grade = before?.pvr?.grade;
-    const {
-      quadrantsDetached: quadrants,
-      detachmentFromClock: from,
-      detachmentToClock: to,
-      totalDetachment,
-    } = before ?? {};
-    if (grade === undefined || !grade.startsWith('D') || totalDetachment === true) return [];
+    const { quadrantsDetached: quadrants, detachmentFromClock: from, detachmentToClock: to } = before ?? {};
+    if (grade === undefined || !grade.startsWith('D')) return [];
     if (quadrants !== undefined && quadrants < 4) {
       return [
         {
