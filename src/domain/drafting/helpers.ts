@@ -111,6 +111,7 @@ export const helpers = {
   moreThan: (value: unknown, than: number) => isNumber(value) && value > than,
   label: (path: string, value: unknown) => (isText(value) ? labelOf(path, value) : ''),
   labels: (path: string, chosen: unknown) => listWords(labels(path, chosen)),
+  either: (path: string, chosen: unknown) => listWords(labels(path, chosen), 'or'),
   lower: (value: unknown) => (isText(value) ? lowerFirst(value) : ''),
   an: (value: unknown) => (isText(value) ? withArticle(value) : ''),
   number: (value: unknown) => (isNumber(value) ? numberWords(value) : ''),

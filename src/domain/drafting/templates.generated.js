@@ -1,5 +1,5 @@
 // Made from templates/ by scripts/templates.ts; do not edit.
-export const TEMPLATES_VERSION = '7f5b088b612c';
+export const TEMPLATES_VERSION = '3308704adbf3';
 export const notes = {
   "operative-note": {"0":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -3089,7 +3089,7 @@ export const notes = {
     };
 
   return "warned to come back at once with "
-    + ((stack1 = lookupProperty(helpers,"labels").call(depth0 != null ? depth0 : (container.nullContext || {}),"aftercare.warningSigns",((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"warningSigns") : stack1),{"name":"labels","hash":{},"data":data,"loc":{"start":{"line":86,"column":88},"end":{"line":86,"column":146}}})) != null ? stack1 : "");
+    + ((stack1 = lookupProperty(helpers,"either").call(depth0 != null ? depth0 : (container.nullContext || {}),"aftercare.warningSigns",((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"warningSigns") : stack1),{"name":"either","hash":{},"data":data,"loc":{"start":{"line":86,"column":88},"end":{"line":86,"column":146}}})) != null ? stack1 : "");
 },"352":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -3853,7 +3853,7 @@ export const letters = {
     };
 
   return "call us at once, day or night, with "
-    + ((stack1 = lookupProperty(helpers,"labels").call(depth0 != null ? depth0 : (container.nullContext || {}),"aftercare.warningSigns",((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"warningSigns") : stack1),{"name":"labels","hash":{},"data":data,"loc":{"start":{"line":29,"column":87},"end":{"line":29,"column":145}}})) != null ? stack1 : "");
+    + ((stack1 = lookupProperty(helpers,"either").call(depth0 != null ? depth0 : (container.nullContext || {}),"aftercare.warningSigns",((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"warningSigns") : stack1),{"name":"either","hash":{},"data":data,"loc":{"start":{"line":29,"column":87},"end":{"line":29,"column":145}}})) != null ? stack1 : "");
 },"65":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {

@@ -21,7 +21,7 @@ const unrecorded = new Set<PropertyKey>([
 ]);
 
 /**
- * Hands out a record through a proxy that notes each place read: a value, an absent value, or a list by its length. What a statement read
+ * Hands out a record through a proxy that notes each place read: a value, an absent value, or a list. What a statement read
  * while it was made is what it rests on.
  */
 export const track = (record: CaseRecord): Tracked => {
@@ -36,12 +36,11 @@ export const track = (record: CaseRecord): Tracked => {
       get: (node, key, receiver): unknown => {
         const value: unknown = Reflect.get(node, key, receiver);
         if (typeof key === 'symbol' || unrecorded.has(key) || typeof value === 'function') return value;
-        if (Array.isArray(node) && key === 'length') {
-          note(path);
-          return value;
-        }
         const inner = path === '' ? key : `${path}.${key}`;
+        // A list is a fact of its own: that it is there, and how long it is.
+        if (Array.isArray(value)) note(inner);
         if (isNode(value)) return wrap(value, inner);
+        if (Array.isArray(node) && key === 'length') return value;
         note(inner);
         return value;
       },

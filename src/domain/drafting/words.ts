@@ -54,8 +54,8 @@ export const timesWords = (value: number): string =>
   value === 1 ? 'once' : value === 2 ? 'twice' : `${countWords(value)} times`;
 
 /** "a, b and c". */
-export const listWords = (items: readonly string[]): string =>
-  items.length < 2 ? (items[0] ?? '') : `${items.slice(0, -1).join(', ')} and ${items.at(-1)}`;
+export const listWords = (items: readonly string[], joint: 'and' | 'or' = 'and'): string =>
+  items.length < 2 ? (items[0] ?? '') : `${items.slice(0, -1).join(', ')} ${joint} ${items.at(-1)}`;
 
 /** "4:30", "12 o’clock", "12:30 to 5 o’clock". */
 export const clockWords = showClock;
@@ -76,7 +76,7 @@ export const labelOf = (path: string, value: string): string => labelsAt(path)[v
 
 /** "a band", "an oval sponge". */
 export const withArticle = (noun: string): string =>
-  `${/^(?:[aeiou]|8|11\b|18\b)/i.test(noun) ? 'an' : 'a'} ${noun}`;
+  `${/^(?:[aeiou]|8|11\b|18\b)/i.test(noun) && !/^(?:one\b|uni|us|eu)/i.test(noun) ? 'an' : 'a'} ${noun}`;
 
 /** A name in small letters unless it is an abbreviation or a name of its own. */
 export const lowerFirst = (text: string): string =>
