@@ -1,0 +1,86 @@
+import { samplesOf } from './sample.ts';
+
+export const concentration = samplesOf('concentration', {
+  gasRight: {
+    faults: [
+      'Air-gas exchange with [[25%]] SF6.',
+      'SF6 [[30 per cent]].',
+      'The cavity was filled with [[18%]] sulphur hexafluoride.',
+      'Gas: SF6 [[12%]].',
+      'SF6 at a concentration of [[22]]% was used.',
+      'SF6 (non-expansile, [[14%]]) was exchanged for air.',
+      '[[100%]] SF6 was used.',
+      'Sulfur hexafluoride [[24]] percent, 50 ml flush.',
+      'RE 25G PPV / EL / SF6 [[26 %]]',
+      'At the end 40 ml of [[23%]] SF6 gas was flushed through the eye and the ports were withdrawn, with the IOP left at 16.',
+      'The gas was drawn up [[pure]] and injected.',
+      'SF6 [[15,5%]]',
+    ],
+    clean: [
+      'Air-gas exchange with 20% SF6.',
+      'SF6 20 per cent, 50 ml syringe.',
+      'SF6 (20,0%) was flushed through.',
+      '10 ml SF6 made up to 50 ml with air (20%).',
+      'Twenty per cent SF6.',
+      'About 90% fill with 20% SF6.',
+      'RE PPV SF6 20%.',
+    ],
+    traps: [
+      '90% fill at the end of the case.',
+      'Povidone-iodine 5% was put into the conjunctival sac.',
+      'The chance of success is about 85–90% with one operation.',
+      'Pred acetate 1% six times a day.',
+      'Marcain 0.5% and lignocaine 2% were used for the block.',
+      'If SF6 above 20% is used, the gas expands.',
+      'C3F8 14% would be chosen for an inferior break.',
+      '“30% SF6 has been used elsewhere,” she was told.',
+      'The risk of PVR is 10%.',
+      'Vision has improved by 50%.',
+      'Phenylephrine 2.5% and tropicamide 1% for dilatation.',
+    ],
+  },
+  combinedRight: {
+    faults: [
+      'C3F8 [[12%]] was put in.',
+      '[[16%]] C3F8 air-gas exchange',
+      'Octafluoropropane [[20%]], posture face down.',
+      'He has [[10 per cent]] C3F8 in the right eye.',
+      'PPV, EB, phaco/IOL, C3F8 ([[41%]]).',
+      'The gas was made up to [[18%]] C3F8 by the scrub nurse.',
+      'Fluid-air exchange, then C3F8 at [[15%]].',
+      'C3F8 gas [[1.4%]].',
+    ],
+    clean: [
+      'C3F8 14% was put in.',
+      'Octafluoropropane at 14 per cent.',
+      '7 ml in 50 ml = 14% C3F8.',
+      'C3F8 14 %',
+    ],
+    traps: [
+      'Cyclopentolate 1% and apraclonidine 1% before surgery.',
+      'C3F8 is non-expansile at 12–14%.',
+      'SF6 20% was thought too short.',
+      'Dexamethasone 0.1% eight times a day.',
+    ],
+  },
+  giantLeft: {
+    faults: [
+      '[[20%]] C2F6 was put in.',
+      'C2F6 [[18%]], face down overnight.',
+      'Perfluoroethane [[12 per cent]] gas.',
+      'C2F6 at [[6%]]',
+      'PFCL-air, air-gas ([[14%]] C2F6).',
+    ],
+    clean: ['C2F6 16%.', '16 per cent C2F6, 8 mL made up to 50 mL.'],
+    traps: ['Levofloxacin 0.5% qds.', 'Betadine 5% for 3 minutes.'],
+  },
+  pneumaticRight: {
+    faults: ['0.3 ml of [[14%]] C3F8 was injected.', 'C3F8, [[diluted]] with air, 0.3 ml.'],
+    clean: ['0.3 ml of 100% C3F8.', 'Pure C3F8 0.3 ml after paracentesis.'],
+    traps: ['The bubble should cover about 30% of the cavity by day three.'],
+  },
+  oilLeft: {
+    clean: ['95% fill with 1000 cSt oil.'],
+    traps: ['14% C3F8 was used in November.', 'Trypan blue 0.15% was used to stain the membranes.'],
+  },
+});

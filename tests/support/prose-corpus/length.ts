@@ -1,0 +1,113 @@
+import { samplesOf } from './sample.ts';
+
+export const length = samplesOf('length', {
+  buckleLeft: {
+    faults: [
+      'A [[4 mm]] solid silicone band was passed under the four recti.',
+      'Band [[3.5 mm]] wide.',
+      'The band was shortened by [[12 mm]].',
+      'Suture bites of [[7 mm]].',
+      'A [[9 mm]] tyre from 1 to 4:30.',
+      'The band was placed [[6 mm]] behind the insertions.',
+      'Axial length [[23.2 mm]].',
+      'Band [[3,5 mm]], nylon 5-0.',
+      'The front edge was [[1 mm]] behind the muscle insertions.',
+      'Height of buckle about [[3 mm]].',
+      'AL [[28.5]] mm, phakic.',
+      'EB [[5mm]], mattress sutures.',
+      'After drainage the 2.5 mm band was tightened by [[15 mm]] so that the buckle was seen well indented in all quadrants.',
+      'Band 2.5 × [[1.25]] mm.',
+    ],
+    clean: [
+      'A 2.5 mm solid silicone band was passed under the four recti.',
+      'Band 2,5 mm wide, 3 mm behind the insertions.',
+      'The band was shortened by 8 mm.',
+      '4.5 mm bites of 5-0 nylon.',
+      'Axial length 25.8 mm.',
+      'AL 25,8.',
+      'Band 2.5 x 0.6 mm, 7 mm tyre.',
+      'Buckle height of about 1.3 mm.',
+      '2.5mm EB + 7mm tyre',
+    ],
+    traps: [
+      'The right axial length is 24.1 mm.',
+      'A 30 mm length of band was cut off.',
+      'The muscle hook was passed 10 mm back.',
+      'The pupil was 8 mm.',
+      'Six millimetres of shortening gives about one millimetre of height.',
+      'A 4 mm band would have been used had the breaks been more posterior.',
+      'Conjunctival relieving cuts of 5 mm.',
+      'Wound gape of 2 mm at the cornea: none.',
+      'IOP 18 mmHg.',
+      'A 7 mm tyre was placed under it.',
+    ],
+  },
+  gasRight: {
+    faults: [
+      'Sclerotomies at [[4 mm]] from the limbus.',
+      'Ports [[3 mm]] behind the limbus.',
+      'Axial length [[26.7]] mm.',
+      'Three 25G ports [[4.0 mm]] from limbus.',
+      'Sclerotomies [[3,0 mm]] behind the limbus.',
+    ],
+    clean: [
+      'Sclerotomies at 3.5 mm from the limbus.',
+      '25G ports, 3,5 mm behind limbus.',
+      'Axial length 24.2.',
+      '3.5mm from limbus',
+    ],
+    traps: [
+      'The tear was about 2 mm across.',
+      'Corneal incision 2.2 mm in 2023.',
+      'The bubble rises 5 mm above the macula.',
+    ],
+  },
+  combinedRight: {
+    faults: [
+      'Band [[2.5 mm]] in scleral tunnels.',
+      'A [[3.5 x 0.75]] mm band.',
+      'The band was tightened by [[10 mm]].',
+      'Sclerotomies [[3 mm]] behind the limbus.',
+      'AL [[22.4 mm]].',
+      'Front edge [[5 mm]] behind the insertions.',
+      'Band 4 × [[0.6 mm]]',
+    ],
+    clean: [
+      'A 4 x 1.25 mm band in four tunnels.',
+      'The band was tightened by 6 mm.',
+      'Ports 4 mm behind the limbus.',
+      'Axial length 26.4 mm measured the day before.',
+      'A four millimetre band, its front edge 2 mm behind the insertions.',
+    ],
+    traps: [
+      'A 2.4 mm corneal incision was made.',
+      'Capsulorhexis of 5.5 mm.',
+      'Optic diameter 6 mm, overall 13 mm.',
+    ],
+  },
+  dialysisLeft: {
+    faults: [
+      'A [[5 mm]] wide oval sponge.',
+      'Bites [[6 mm]] apart, 5-0 polyester.',
+      'Sponge [[4 mm]] behind the insertions.',
+      'Oval sponge 5.5 × [[9 mm]].',
+    ],
+    clean: [
+      'Oval sponge 5.5 × 7.5 mm.',
+      'A 7.5 mm oval sponge, 1 mm behind the insertions.',
+      '5-0 polyester, 9.5 mm bites.',
+      '7,5 x 5,5 mm oval sponge',
+    ],
+    traps: ['Hyphaema 2 mm at presentation, since cleared.'],
+  },
+  giantLeft: {
+    faults: ['27G ports at [[3 mm]].', 'Sclerotomies [[3.5mm]] post-limbal.'],
+    clean: ['27G ports 4 mm from the limbus.'],
+    traps: ['The flap was 3 mm from the arcade.'],
+  },
+  oilLeft: {
+    faults: ['Axial length [[25.6 mm]].', 'Ports at [[4 mm]] from the limbus.'],
+    clean: ['Ports 3.5 mm from the limbus.', 'AL 23.6 mm.'],
+    traps: ['Retinectomy edge 1 mm behind the old scar.'],
+  },
+});
