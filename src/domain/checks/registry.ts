@@ -8,6 +8,8 @@ import { rule as arcAgainstRole } from './rules/arc-against-role/rule.ts';
 import { rule as assistantWithoutPart } from './rules/assistant-without-part/rule.ts';
 import { rule as axialLengthFromBeforeBand } from './rules/axial-length-from-before-band/rule.ts';
 import { rule as axialLengthUnusual } from './rules/axial-length-unusual/rule.ts';
+import { rule as axialLengthUsedDiffers } from './rules/axial-length-used-differs/rule.ts';
+import { rule as bagWithoutCapsule } from './rules/bag-without-capsule/rule.ts';
 import { rule as bandDoesNotFitGlobe } from './rules/band-does-not-fit-globe/rule.ts';
 import { rule as bandFarFromUsualPlace } from './rules/band-far-from-usual-place/rule.ts';
 import { rule as bandFixedInFewQuadrants } from './rules/band-fixed-in-few-quadrants/rule.ts';
@@ -41,6 +43,7 @@ import { rule as complicationsAgainstOutcome } from './rules/complications-again
 import { rule as conjunctivaOpenedNotClosed } from './rules/conjunctiva-opened-not-closed/rule.ts';
 import { rule as countDiscrepancyOpen } from './rules/count-discrepancy-open/rule.ts';
 import { rule as dateOutOfOrder } from './rules/date-out-of-order/rule.ts';
+import { rule as detachmentLeftOpen } from './rules/detachment-left-open/rule.ts';
 import { rule as detachmentSurgeryRepeated } from './rules/detachment-surgery-repeated/rule.ts';
 import { rule as detachmentWithoutDetachment } from './rules/detachment-without-detachment/rule.ts';
 import { rule as diagnosisAgainstBreaks } from './rules/diagnosis-against-breaks/rule.ts';
@@ -49,8 +52,11 @@ import { rule as dilutionWrong } from './rules/dilution-wrong/rule.ts';
 import { rule as discNotPerfusedAtEnd } from './rules/disc-not-perfused-at-end/rule.ts';
 import { rule as discNotPerfusedUnresolved } from './rules/disc-not-perfused-unresolved/rule.ts';
 import { rule as drainageDetailsWithoutDrainage } from './rules/drainage-details-without-drainage/rule.ts';
+import { rule as drainageOffTheDetachment } from './rules/drainage-off-the-detachment/rule.ts';
 import { rule as drainageRetinotomyMissing } from './rules/drainage-retinotomy-missing/rule.ts';
+import { rule as drainageRetinotomyNotDescribed } from './rules/drainage-retinotomy-not-described/rule.ts';
 import { rule as drainageWithoutOutcome } from './rules/drainage-without-outcome/rule.ts';
+import { rule as drainedThroughMissingBreak } from './rules/drained-through-missing-break/rule.ts';
 import { rule as dropWithoutDose } from './rules/drop-without-dose/rule.ts';
 import { rule as earlierSurgeryOnOtherEyeOnly } from './rules/earlier-surgery-on-other-eye-only/rule.ts';
 import { rule as elementAwayFromBreak } from './rules/element-away-from-break/rule.ts';
@@ -60,6 +66,7 @@ import { rule as elementWithoutFixation } from './rules/element-without-fixation
 import { rule as elementWithoutFrontEdge } from './rules/element-without-front-edge/rule.ts';
 import { rule as elementWithoutPlace } from './rules/element-without-place/rule.ts';
 import { rule as elementWithoutSize } from './rules/element-without-size/rule.ts';
+import { rule as endolaserWithoutVitrectomy } from './rules/endolaser-without-vitrectomy/rule.ts';
 import { rule as endsBeforeStart } from './rules/ends-before-start/rule.ts';
 import { rule as expansileConcentration } from './rules/expansile-concentration/rule.ts';
 import { rule as expiredImplant } from './rules/expired-implant/rule.ts';
@@ -69,6 +76,7 @@ import { rule as fixationIncomplete } from './rules/fixation-incomplete/rule.ts'
 import { rule as fixationOffTheElement } from './rules/fixation-off-the-element/rule.ts';
 import { rule as fixedDateForFlying } from './rules/fixed-date-for-flying/rule.ts';
 import { rule as fluidAgainstFlat } from './rules/fluid-against-flat/rule.ts';
+import { rule as fluidLeftWhereMissing } from './rules/fluid-left-where-missing/rule.ts';
 import { rule as flyingBeforeGasGone } from './rules/flying-before-gas-gone/rule.ts';
 import { rule as followUpBeforeSurgery } from './rules/follow-up-before-surgery/rule.ts';
 import { rule as formAgainstMaterial } from './rules/form-against-material/rule.ts';
@@ -81,46 +89,59 @@ import { rule as gasWithoutPosture } from './rules/gas-without-posture/rule.ts';
 import { rule as giantTearTooSmall } from './rules/giant-tear-too-small/rule.ts';
 import { rule as giantTearWithoutPvd } from './rules/giant-tear-without-pvd/rule.ts';
 import { rule as heavyLiquidLeft } from './rules/heavy-liquid-left/rule.ts';
+import { rule as heavyLiquidLeftLong } from './rules/heavy-liquid-left-long/rule.ts';
+import { rule as heavyLiquidUnderRetinaNotUsed } from './rules/heavy-liquid-under-retina-not-used/rule.ts';
 import { rule as heavyLiquidUseNotRecorded } from './rules/heavy-liquid-use-not-recorded/rule.ts';
 import { rule as heavyOilFaceDown } from './rules/heavy-oil-face-down/rule.ts';
 import { rule as heightAboveBound } from './rules/height-above-bound/rule.ts';
 import { rule as highPressureWithoutPerfusion } from './rules/high-pressure-without-perfusion/rule.ts';
 import { rule as horseshoeWithVitreousAttached } from './rules/horseshoe-with-vitreous-attached/rule.ts';
 import { rule as hyaloidAgainstBefore } from './rules/hyaloid-against-before/rule.ts';
+import { rule as hyaloidLeftAttached } from './rules/hyaloid-left-attached/rule.ts';
 import { rule as implantPowerMissing } from './rules/implant-power-missing/rule.ts';
+import { rule as implantPowerUnusual } from './rules/implant-power-unusual/rule.ts';
+import { rule as implantWithTightenedBand } from './rules/implant-with-tightened-band/rule.ts';
 import { rule as implantWithoutLot } from './rules/implant-without-lot/rule.ts';
 import { rule as internalDrainageWithoutVitrectomy } from './rules/internal-drainage-without-vitrectomy/rule.ts';
 import { rule as largeFillVolumeMismatch } from './rules/large-fill-volume-mismatch/rule.ts';
 import { rule as lastingClosureTemporaryBand } from './rules/lasting-closure-temporary-band/rule.ts';
 import { rule as lateReview } from './rules/late-review/rule.ts';
+import { rule as latticeTreatedWithoutRetinopexy } from './rules/lattice-treated-without-retinopexy/rule.ts';
 import { rule as lensBeforeAgainstHistory } from './rules/lens-before-against-history/rule.ts';
 import { rule as lensImplantInPhakicEye } from './rules/lens-implant-in-phakic-eye/rule.ts';
+import { rule as lensRemovedImplantNotRecorded } from './rules/lens-removed-implant-not-recorded/rule.ts';
+import { rule as lensTouchWithoutLens } from './rules/lens-touch-without-lens/rule.ts';
 import { rule as lensWorkAgainstLens } from './rules/lens-work-against-lens/rule.ts';
 import { rule as lincoffRule } from './rules/lincoff-rule/rule.ts';
 import { rule as lowerBreaksLightTamponadeUpright } from './rules/lower-breaks-light-tamponade-upright/rule.ts';
 import { rule as maculaOffBeforeSymptoms } from './rules/macula-off-before-symptoms/rule.ts';
 import { rule as maculaOffDurationMissing } from './rules/macula-off-duration-missing/rule.ts';
 import { rule as maculaOnForDaysOff } from './rules/macula-on-for-days-off/rule.ts';
+import { rule as macularHoleBurned } from './rules/macular-hole-burned/rule.ts';
 import { rule as macularHoleInPeriphery } from './rules/macular-hole-in-periphery/rule.ts';
 import { rule as markNotRecorded } from './rules/mark-not-recorded/rule.ts';
 import { rule as measuredBloodLossMissing } from './rules/measured-blood-loss-missing/rule.ts';
 import { rule as medicineGivenOutsideOperation } from './rules/medicine-given-outside-operation/rule.ts';
+import { rule as membraneDyeWithoutPeel } from './rules/membrane-dye-without-peel/rule.ts';
 import { rule as muscleOffTheSegment } from './rules/muscle-off-the-segment/rule.ts';
 import { rule as musclesAgainstBand } from './rules/muscles-against-band/rule.ts';
 import { rule as nitrousOxideAndGas } from './rules/nitrous-oxide-and-gas/rule.ts';
 import { rule as nitrousOxideStoppedOutsideOperation } from './rules/nitrous-oxide-stopped-outside-operation/rule.ts';
 import { rule as nitrousOxideToTheEnd } from './rules/nitrous-oxide-to-the-end/rule.ts';
+import { rule as noneBesideOthers } from './rules/none-beside-others/rule.ts';
 import { rule as oilInAphakicEye } from './rules/oil-in-aphakic-eye/rule.ts';
 import { rule as oilWithoutRemovalPlan } from './rules/oil-without-removal-plan/rule.ts';
 import { rule as oilWithoutViscosity } from './rules/oil-without-viscosity/rule.ts';
 import { rule as onePersonInTwoRoles } from './rules/one-person-in-two-roles/rule.ts';
 import { rule as openingAndClosureMissing } from './rules/opening-and-closure-missing/rule.ts';
+import { rule as outcomeNotAmongComplications } from './rules/outcome-not-among-complications/rule.ts';
 import { rule as performedAgainstStages } from './rules/performed-against-stages/rule.ts';
 import { rule as perfusionNotRecorded } from './rules/perfusion-not-recorded/rule.ts';
 import { rule as planChangedWithoutReason } from './rules/plan-changed-without-reason/rule.ts';
 import { rule as pneumaticBreaksOutOfReach } from './rules/pneumatic-breaks-out-of-reach/rule.ts';
 import { rule as pneumaticVolume } from './rules/pneumatic-volume/rule.ts';
 import { rule as pneumaticWithVitrectomy } from './rules/pneumatic-with-vitrectomy/rule.ts';
+import { rule as portsUnusual } from './rules/ports-unusual/rule.ts';
 import { rule as postureHoursDoNotAddUp } from './rules/posture-hours-do-not-add-up/rule.ts';
 import { rule as postureLeavesBreakDry } from './rules/posture-leaves-break-dry/rule.ts';
 import { rule as postureOnWrongSide } from './rules/posture-on-wrong-side/rule.ts';
@@ -146,8 +167,12 @@ import { rule as requiredEnd } from './rules/required-end/rule.ts';
 import { rule as requiredFindings } from './rules/required-findings/rule.ts';
 import { rule as requiredSteps } from './rules/required-steps/rule.ts';
 import { rule as requiredWho } from './rules/required-who/rule.ts';
+import { rule as retinaDetachedAtEnd } from './rules/retina-detached-at-end/rule.ts';
+import { rule as retinopexyIncomplete } from './rules/retinopexy-incomplete/rule.ts';
 import { rule as retinopexyKindsDiffer } from './rules/retinopexy-kinds-differ/rule.ts';
 import { rule as retinopexyOfMissingBreak } from './rules/retinopexy-of-missing-break/rule.ts';
+import { rule as retinopexySettingsAgainstKind } from './rules/retinopexy-settings-against-kind/rule.ts';
+import { rule as retinopexySettingsUnusual } from './rules/retinopexy-settings-unusual/rule.ts';
 import { rule as retinotomyUntreated } from './rules/retinotomy-untreated/rule.ts';
 import { rule as reviewDatesDiffer } from './rules/review-dates-differ/rule.ts';
 import { rule as sclerotomiesOffParsPlana } from './rules/sclerotomies-off-pars-plana/rule.ts';
@@ -157,6 +182,7 @@ import { rule as segmentOverHalf } from './rules/segment-over-half/rule.ts';
 import { rule as shortenedTooMuch } from './rules/shortened-too-much/rule.ts';
 import { rule as shortenedWithoutRing } from './rules/shortened-without-ring/rule.ts';
 import { rule as sideDiffers } from './rules/side-differs/rule.ts';
+import { rule as siliconeImplantWithOil } from './rules/silicone-implant-with-oil/rule.ts';
 import { rule as smallHyperopicEye } from './rules/small-hyperopic-eye/rule.ts';
 import { rule as steroidAndAntibioticMissing } from './rules/steroid-and-antibiotic-missing/rule.ts';
 import { rule as supervisionIncomplete } from './rules/supervision-incomplete/rule.ts';
@@ -173,12 +199,17 @@ import { rule as thickerThanItsForm } from './rules/thicker-than-its-form/rule.t
 import { rule as tightenedWithoutPressure } from './rules/tightened-without-pressure/rule.ts';
 import { rule as timeOutAfterStart } from './rules/time-out-after-start/rule.ts';
 import { rule as timeOutNotTimed } from './rules/time-out-not-timed/rule.ts';
+import { rule as tissueAgainstSteps } from './rules/tissue-against-steps/rule.ts';
 import { rule as totalDetachmentMaculaOn } from './rules/total-detachment-macula-on/rule.ts';
 import { rule as traineeWithoutSupervisor } from './rules/trainee-without-supervisor/rule.ts';
+import { rule as treatedBreakNotAmongTargets } from './rules/treated-break-not-among-targets/rule.ts';
 import { rule as treatmentForOtherEye } from './rules/treatment-for-other-eye/rule.ts';
 import { rule as twoBands } from './rules/two-bands/rule.ts';
 import { rule as underBandWithoutBand } from './rules/under-band-without-band/rule.ts';
+import { rule as untreatedBreakAmongTargets } from './rules/untreated-break-among-targets/rule.ts';
 import { rule as vitrectomyDetailsWithoutVitrectomy } from './rules/vitrectomy-details-without-vitrectomy/rule.ts';
+import { rule as vitrectomyIncomplete } from './rules/vitrectomy-incomplete/rule.ts';
+import { rule as widePortsSutureless } from './rules/wide-ports-sutureless/rule.ts';
 
 /** Changes whenever a rule comes, goes or asks something else; kept with every signature. */
 export const RULES_VERSION = '2026-12-02';
@@ -194,6 +225,8 @@ export const rules: readonly Rule[] = [
   assistantWithoutPart,
   axialLengthFromBeforeBand,
   axialLengthUnusual,
+  axialLengthUsedDiffers,
+  bagWithoutCapsule,
   bandDoesNotFitGlobe,
   bandFarFromUsualPlace,
   bandFixedInFewQuadrants,
@@ -227,6 +260,7 @@ export const rules: readonly Rule[] = [
   conjunctivaOpenedNotClosed,
   countDiscrepancyOpen,
   dateOutOfOrder,
+  detachmentLeftOpen,
   detachmentSurgeryRepeated,
   detachmentWithoutDetachment,
   diagnosisAgainstBreaks,
@@ -235,8 +269,11 @@ export const rules: readonly Rule[] = [
   discNotPerfusedAtEnd,
   discNotPerfusedUnresolved,
   drainageDetailsWithoutDrainage,
+  drainageOffTheDetachment,
   drainageRetinotomyMissing,
+  drainageRetinotomyNotDescribed,
   drainageWithoutOutcome,
+  drainedThroughMissingBreak,
   dropWithoutDose,
   earlierSurgeryOnOtherEyeOnly,
   elementAwayFromBreak,
@@ -246,6 +283,7 @@ export const rules: readonly Rule[] = [
   elementWithoutFrontEdge,
   elementWithoutPlace,
   elementWithoutSize,
+  endolaserWithoutVitrectomy,
   endsBeforeStart,
   expansileConcentration,
   expiredImplant,
@@ -255,6 +293,7 @@ export const rules: readonly Rule[] = [
   fixationOffTheElement,
   fixedDateForFlying,
   fluidAgainstFlat,
+  fluidLeftWhereMissing,
   flyingBeforeGasGone,
   followUpBeforeSurgery,
   formAgainstMaterial,
@@ -267,46 +306,59 @@ export const rules: readonly Rule[] = [
   giantTearTooSmall,
   giantTearWithoutPvd,
   heavyLiquidLeft,
+  heavyLiquidLeftLong,
+  heavyLiquidUnderRetinaNotUsed,
   heavyLiquidUseNotRecorded,
   heavyOilFaceDown,
   heightAboveBound,
   highPressureWithoutPerfusion,
   horseshoeWithVitreousAttached,
   hyaloidAgainstBefore,
+  hyaloidLeftAttached,
   implantPowerMissing,
+  implantPowerUnusual,
+  implantWithTightenedBand,
   implantWithoutLot,
   internalDrainageWithoutVitrectomy,
   largeFillVolumeMismatch,
   lastingClosureTemporaryBand,
   lateReview,
+  latticeTreatedWithoutRetinopexy,
   lensBeforeAgainstHistory,
   lensImplantInPhakicEye,
+  lensRemovedImplantNotRecorded,
+  lensTouchWithoutLens,
   lensWorkAgainstLens,
   lincoffRule,
   lowerBreaksLightTamponadeUpright,
   maculaOffBeforeSymptoms,
   maculaOffDurationMissing,
   maculaOnForDaysOff,
+  macularHoleBurned,
   macularHoleInPeriphery,
   markNotRecorded,
   measuredBloodLossMissing,
   medicineGivenOutsideOperation,
+  membraneDyeWithoutPeel,
   muscleOffTheSegment,
   musclesAgainstBand,
   nitrousOxideAndGas,
   nitrousOxideStoppedOutsideOperation,
   nitrousOxideToTheEnd,
+  noneBesideOthers,
   oilInAphakicEye,
   oilWithoutRemovalPlan,
   oilWithoutViscosity,
   onePersonInTwoRoles,
   openingAndClosureMissing,
+  outcomeNotAmongComplications,
   performedAgainstStages,
   perfusionNotRecorded,
   planChangedWithoutReason,
   pneumaticBreaksOutOfReach,
   pneumaticVolume,
   pneumaticWithVitrectomy,
+  portsUnusual,
   postureHoursDoNotAddUp,
   postureLeavesBreakDry,
   postureOnWrongSide,
@@ -332,8 +384,12 @@ export const rules: readonly Rule[] = [
   requiredFindings,
   requiredSteps,
   requiredWho,
+  retinaDetachedAtEnd,
+  retinopexyIncomplete,
   retinopexyKindsDiffer,
   retinopexyOfMissingBreak,
+  retinopexySettingsAgainstKind,
+  retinopexySettingsUnusual,
   retinotomyUntreated,
   reviewDatesDiffer,
   sclerotomiesOffParsPlana,
@@ -343,6 +399,7 @@ export const rules: readonly Rule[] = [
   shortenedTooMuch,
   shortenedWithoutRing,
   sideDiffers,
+  siliconeImplantWithOil,
   smallHyperopicEye,
   steroidAndAntibioticMissing,
   supervisionIncomplete,
@@ -359,10 +416,15 @@ export const rules: readonly Rule[] = [
   tightenedWithoutPressure,
   timeOutAfterStart,
   timeOutNotTimed,
+  tissueAgainstSteps,
   totalDetachmentMaculaOn,
   traineeWithoutSupervisor,
+  treatedBreakNotAmongTargets,
   treatmentForOtherEye,
   twoBands,
   underBandWithoutBand,
+  untreatedBreakAmongTargets,
   vitrectomyDetailsWithoutVitrectomy,
+  vitrectomyIncomplete,
+  widePortsSutureless,
 ];

@@ -10,17 +10,15 @@ export const rule = defineRule({
   source: { text: 'ICD-10-CM Excludes1: H33.0 with H33.2', certainty: 'R2' },
   answerable: false,
   check: (record) => {
-    const after = record.endOfCase?.postoperativeDiagnosis;
-    const diagnosis = after ?? record.before?.diagnosis;
+    // A diagnosis from before that the operation did not bear out is no contradiction.
     const index = breaksOf(record).findIndex(
       ({ onDetachedRetina, kind }) =>
         onDetachedRetina === true || kind === 'giant-tear' || kind === 'dialysis',
     );
-    if (diagnosis !== 'serous' || index < 0) return [];
-    const field = after === undefined ? 'before.diagnosis' : 'endOfCase.postoperativeDiagnosis';
+    if (record.endOfCase?.postoperativeDiagnosis !== 'serous' || index < 0) return [];
     return [
       {
-        fields: [field, `breaks.found.${index}.kind`],
+        fields: ['endOfCase.postoperativeDiagnosis', `breaks.found.${index}.kind`],
         message: `The diagnosis is serous retinal detachment; break ${index + 1} is recorded on detached retina.`,
       },
     ];
@@ -56,7 +54,10 @@ export const rule = defineRule({
     unknown: [
       {
         name: 'not said whether detached',
-        record: { before: { diagnosis: 'serous' }, breaks: { found: [{ kind: 'round-hole' }] } },
+        record: {
+          endOfCase: { postoperativeDiagnosis: 'serous' },
+          breaks: { found: [{ kind: 'round-hole' }] },
+        },
       },
     ],
   },
