@@ -46,7 +46,7 @@ const Tables = () => {
   return tables.map((table) => (
     <section key={table.id} className="sheet-section">
       <h3>{table.heading}</h3>
-      <div className="scroll-x">
+      <div className="fit">
         <table className="sheet-table">
           <thead>
             <tr>

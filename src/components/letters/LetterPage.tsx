@@ -185,7 +185,7 @@ export const LetterPage = (props: Props) => {
         : 'Send: confirm the address first';
 
   return (
-    <div className="grid gap-6 lg:grid-cols-[1fr_20rem]">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-6 lg:grid-cols-[minmax(0,1fr)_20rem]">
       <article className="border border-rule bg-sheet p-8 font-serif leading-relaxed" aria-label="Letter">
         {sheet.sections.map((section) => (
           <section key={section.id} className="mb-4">

@@ -52,7 +52,7 @@ export interface Rule {
   source: { text: string; certainty: 'R' | 'R2' | 'M' | 'C' | 'P' };
   /** Whether a reason may answer it. Never true of a contradiction. */
   answerable: boolean;
-  /** Rules that say the same more exactly: where one of them fires, this one is silent. */
+  /** Rules that say the same more exactly: where one of them fires on the same item, this one is silent. */
   unless?: readonly string[];
   /** Pure; what is absent is unknown, and unknown is never a contradiction. */
   check: (record: CaseRecord) => Finding[];
