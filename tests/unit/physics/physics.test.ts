@@ -37,9 +37,9 @@ const positive = (max: number) => fc.double({ min: 0.01, max, noNaN: true });
 describe('band', () => {
   it('has height and shortening that are each other’s inverse', () => {
     fc.assert(
-      fc.property(positive(40), (mm) =>
-        expect(shorteningForHeight(heightFromShortening(mm))).toBeCloseTo(mm, 9),
-      ),
+      fc.property(positive(40), (mm) => {
+        expect(shorteningForHeight(heightFromShortening(mm))).toBeCloseTo(mm, 9);
+      }),
     );
   });
 
