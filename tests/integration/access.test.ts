@@ -108,6 +108,34 @@ describe('signing out', () => {
   });
 });
 
+describe('a session', () => {
+  it('ends when it was idle or has lasted too long', async () => {
+    const client = new pg.Client({ connectionString: database.ownerUrl });
+    await client.connect();
+    for (const change of [
+      "expires_at = now() - interval '1 second'",
+      "created_at = now() - interval '13 hours'",
+    ]) {
+      const person = await signInAs(server.url, 'fellow');
+      expect((await person.get('/handbook')).status).toBe(200);
+      await client.query(
+        `update sessions set ${change} where user_id = (select id from people where email = 'fellow@example.org')`,
+      );
+      expect((await person.get('/handbook')).status).toBe(302);
+    }
+    await client.end();
+  });
+
+  it('is kept only as the hash of its token', async () => {
+    const client = new pg.Client({ connectionString: database.ownerUrl });
+    await client.connect();
+    await signInAs(server.url, 'fellow');
+    const { rows } = await client.query('select id from sessions');
+    await client.end();
+    for (const { id } of rows) expect(id).toMatch(/^[0-9a-f]{64}$/);
+  });
+});
+
 describe('being kept out', () => {
   it('ends every session at once', async () => {
     const fellow = await signInAs(server.url, 'fellow');

@@ -10,6 +10,8 @@ let database: TestDatabase;
 let server: TestServer;
 let owner: pg.Client;
 let app: pg.Client;
+/** How often the family doctor's mail server has asked to come back later. */
+let busyTimes = 0;
 let surgeon: Person;
 let secretary: Person;
 
@@ -28,7 +30,7 @@ const sign = (id: string, revision: number, typed = password) =>
   surgeon.send('POST', `/api/cases/${id}/sign`, { password: typed, meaning: 'author' }, revision);
 
 const until = async (holds: () => Promise<boolean>): Promise<void> => {
-  const limit = Date.now() + 25_000;
+  const limit = Date.now() + 40_000;
   while (!(await holds())) {
     if (Date.now() > limit) throw new Error('This did not happen in time.');
     await new Promise((resolve) => setTimeout(resolve, 200));
@@ -40,7 +42,12 @@ beforeAll(async () => {
   server = await startServer({
     database,
     instances: 2,
-    refuse: (address) => (address.startsWith('bram') ? { code: 550, message: 'no such person' } : undefined),
+    refuse: (address) => {
+      if (address.startsWith('bram')) return { code: 550, message: 'no such person' };
+      if (!address.startsWith('hazel') || busyTimes >= 1) return undefined;
+      busyTimes += 1;
+      return { code: 451, message: 'try later' };
+    },
   });
   owner = new pg.Client({ connectionString: database.ownerUrl });
   app = new pg.Client({ connectionString: database.url });
@@ -239,6 +246,23 @@ describe('letters', () => {
     await secretary.send('POST', `/api/letters/${id}/send`, {}, revision + 1);
     await until(async () => (await stateOf(id)).state === 'failed');
     expect((await stateOf(id)).last_error).toContain('Check the address');
+  });
+});
+
+describe('a mail server that is busy', () => {
+  it('gets the letter by itself when it is tried again', async () => {
+    const { rows } = await owner.query(
+      "select id, revision, sheet from letters where kind = 'family-doctor'",
+    );
+    const { id, revision, sheet } = rows[0];
+    const reader = await owner.query("select id from recipients where name = 'Dr Hazel Underwillow'");
+    await secretary.send('PUT', `/api/letters/${id}`, { sheet, recipientId: reader.rows[0].id }, revision);
+    await secretary.send('POST', `/api/letters/${id}/send`, {}, revision + 1);
+    await until(async () => {
+      const letter = await owner.query('select state, attempts from letters where id = $1', [id]);
+      return letter.rows[0].state === 'sent' && letter.rows[0].attempts === 2;
+    });
+    expect(busyTimes).toBe(1);
   });
 });
 
