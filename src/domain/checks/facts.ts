@@ -84,8 +84,8 @@ export { dateWords, labelOf, listWords, numberWords };
 /** Where the retina is detached: an arc, the whole round, or `undefined` while it is not recorded. */
 export const detachedArcOf = (record: CaseRecord): ClockArc | 'all' | undefined => {
   const { totalDetachment, detachmentFromClock: from, detachmentToClock: to } = record.before ?? {};
-  if (totalDetachment === true) return 'all';
-  return from === undefined || to === undefined ? undefined : { from, to };
+  if (from !== undefined && to !== undefined) return { from, to };
+  return totalDetachment === true ? 'all' : undefined;
 };
 
 /** Those of several facts that are absent; `field` is where each belongs, `what` how it is called. */

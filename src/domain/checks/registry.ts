@@ -3,6 +3,7 @@ import { rule as absorbableFixation } from './rules/absorbable-fixation/rule.ts'
 import { rule as acuityAgainstMacula } from './rules/acuity-against-macula/rule.ts';
 import { rule as agentExchangeMismatch } from './rules/agent-exchange-mismatch/rule.ts';
 import { rule as allergyAgainstMedicine } from './rules/allergy-against-medicine/rule.ts';
+import { rule as aminoglycosideInsideEye } from './rules/aminoglycoside-inside-eye/rule.ts';
 import { rule as anaesthetistMissing } from './rules/anaesthetist-missing/rule.ts';
 import { rule as arcAgainstRole } from './rules/arc-against-role/rule.ts';
 import { rule as assistantWithoutPart } from './rules/assistant-without-part/rule.ts';
@@ -21,6 +22,10 @@ import { rule as biteNarrowerThanElement } from './rules/bite-narrower-than-elem
 import { rule as bleedingRiskExternalDrainage } from './rules/bleeding-risk-external-drainage/rule.ts';
 import { rule as blockAgainstAnaesthesia } from './rules/block-against-anaesthesia/rule.ts';
 import { rule as blockEyeMissing } from './rules/block-eye-missing/rule.ts';
+import { rule as blockVolumeUnusual } from './rules/block-volume-unusual/rule.ts';
+import { rule as blockWithoutAgent } from './rules/block-without-agent/rule.ts';
+import { rule as bloodLossAgainstFigure } from './rules/blood-loss-against-figure/rule.ts';
+import { rule as bloodLossUnusual } from './rules/blood-loss-unusual/rule.ts';
 import { rule as bornAfterSurgery } from './rules/born-after-surgery/rule.ts';
 import { rule as breakAsLargeAsGiantTear } from './rules/break-as-large-as-giant-tear/rule.ts';
 import { rule as breakEdgesCrossed } from './rules/break-edges-crossed/rule.ts';
@@ -32,6 +37,7 @@ import { rule as breakUnsupported } from './rules/break-unsupported/rule.ts';
 import { rule as breakWithoutRetinopexy } from './rules/break-without-retinopexy/rule.ts';
 import { rule as breaksInSerousDetachment } from './rules/breaks-in-serous-detachment/rule.ts';
 import { rule as broadElementInOlderPatient } from './rules/broad-element-in-older-patient/rule.ts';
+import { rule as bubbleSmallerThanBreak } from './rules/bubble-smaller-than-break/rule.ts';
 import { rule as buckleWithoutOpening } from './rules/buckle-without-opening/rule.ts';
 import { rule as cephalosporinAfterPenicillinAllergy } from './rules/cephalosporin-after-penicillin-allergy/rule.ts';
 import { rule as clockOutsideQuadrant } from './rules/clock-outside-quadrant/rule.ts';
@@ -39,9 +45,12 @@ import { rule as closureMaterialAgainstKind } from './rules/closure-material-aga
 import { rule as closureMaterialMissing } from './rules/closure-material-missing/rule.ts';
 import { rule as closureOnOpenElement } from './rules/closure-on-open-element/rule.ts';
 import { rule as complicationWithoutAction } from './rules/complication-without-action/rule.ts';
+import { rule as complicationWithoutKind } from './rules/complication-without-kind/rule.ts';
 import { rule as complicationsAgainstOutcome } from './rules/complications-against-outcome/rule.ts';
+import { rule as concentrationLow } from './rules/concentration-low/rule.ts';
 import { rule as conjunctivaOpenedNotClosed } from './rules/conjunctiva-opened-not-closed/rule.ts';
 import { rule as countDiscrepancyOpen } from './rules/count-discrepancy-open/rule.ts';
+import { rule as countsCorrectWithDiscrepancy } from './rules/counts-correct-with-discrepancy/rule.ts';
 import { rule as dateOutOfOrder } from './rules/date-out-of-order/rule.ts';
 import { rule as detachmentLeftOpen } from './rules/detachment-left-open/rule.ts';
 import { rule as detachmentSurgeryRepeated } from './rules/detachment-surgery-repeated/rule.ts';
@@ -58,6 +67,7 @@ import { rule as drainageRetinotomyNotDescribed } from './rules/drainage-retinot
 import { rule as drainageWithoutOutcome } from './rules/drainage-without-outcome/rule.ts';
 import { rule as drainedThroughMissingBreak } from './rules/drained-through-missing-break/rule.ts';
 import { rule as dropWithoutDose } from './rules/drop-without-dose/rule.ts';
+import { rule as dropWithoutEye } from './rules/drop-without-eye/rule.ts';
 import { rule as earlierSurgeryOnOtherEyeOnly } from './rules/earlier-surgery-on-other-eye-only/rule.ts';
 import { rule as elementAwayFromBreak } from './rules/element-away-from-break/rule.ts';
 import { rule as elementFixedByNothing } from './rules/element-fixed-by-nothing/rule.ts';
@@ -68,6 +78,7 @@ import { rule as elementWithoutPlace } from './rules/element-without-place/rule.
 import { rule as elementWithoutSize } from './rules/element-without-size/rule.ts';
 import { rule as endolaserWithoutVitrectomy } from './rules/endolaser-without-vitrectomy/rule.ts';
 import { rule as endsBeforeStart } from './rules/ends-before-start/rule.ts';
+import { rule as exchangeWithoutVitrectomy } from './rules/exchange-without-vitrectomy/rule.ts';
 import { rule as expansileConcentration } from './rules/expansile-concentration/rule.ts';
 import { rule as expiredImplant } from './rules/expired-implant/rule.ts';
 import { rule as extentAgainstQuadrants } from './rules/extent-against-quadrants/rule.ts';
@@ -75,6 +86,7 @@ import { rule as extentHalfRecorded } from './rules/extent-half-recorded/rule.ts
 import { rule as fixationIncomplete } from './rules/fixation-incomplete/rule.ts';
 import { rule as fixationOffTheElement } from './rules/fixation-off-the-element/rule.ts';
 import { rule as fixedDateForFlying } from './rules/fixed-date-for-flying/rule.ts';
+import { rule as flatOnBackWithGas } from './rules/flat-on-back-with-gas/rule.ts';
 import { rule as fluidAgainstFlat } from './rules/fluid-against-flat/rule.ts';
 import { rule as fluidLeftWhereMissing } from './rules/fluid-left-where-missing/rule.ts';
 import { rule as flyingBeforeGasGone } from './rules/flying-before-gas-gone/rule.ts';
@@ -92,6 +104,7 @@ import { rule as heavyLiquidLeft } from './rules/heavy-liquid-left/rule.ts';
 import { rule as heavyLiquidLeftLong } from './rules/heavy-liquid-left-long/rule.ts';
 import { rule as heavyLiquidUnderRetinaNotUsed } from './rules/heavy-liquid-under-retina-not-used/rule.ts';
 import { rule as heavyLiquidUseNotRecorded } from './rules/heavy-liquid-use-not-recorded/rule.ts';
+import { rule as heavyOilBreaksAbove } from './rules/heavy-oil-breaks-above/rule.ts';
 import { rule as heavyOilFaceDown } from './rules/heavy-oil-face-down/rule.ts';
 import { rule as heightAboveBound } from './rules/height-above-bound/rule.ts';
 import { rule as highPressureWithoutPerfusion } from './rules/high-pressure-without-perfusion/rule.ts';
@@ -113,6 +126,7 @@ import { rule as lensRemovedImplantNotRecorded } from './rules/lens-removed-impl
 import { rule as lensTouchWithoutLens } from './rules/lens-touch-without-lens/rule.ts';
 import { rule as lensWorkAgainstLens } from './rules/lens-work-against-lens/rule.ts';
 import { rule as lincoffRule } from './rules/lincoff-rule/rule.ts';
+import { rule as localAnaestheticStrength } from './rules/local-anaesthetic-strength/rule.ts';
 import { rule as lowerBreaksLightTamponadeUpright } from './rules/lower-breaks-light-tamponade-upright/rule.ts';
 import { rule as maculaOffBeforeSymptoms } from './rules/macula-off-before-symptoms/rule.ts';
 import { rule as maculaOffDurationMissing } from './rules/macula-off-duration-missing/rule.ts';
@@ -122,19 +136,28 @@ import { rule as macularHoleInPeriphery } from './rules/macular-hole-in-peripher
 import { rule as markNotRecorded } from './rules/mark-not-recorded/rule.ts';
 import { rule as measuredBloodLossMissing } from './rules/measured-blood-loss-missing/rule.ts';
 import { rule as medicineGivenOutsideOperation } from './rules/medicine-given-outside-operation/rule.ts';
+import { rule as medicineIncomplete } from './rules/medicine-incomplete/rule.ts';
 import { rule as membraneDyeWithoutPeel } from './rules/membrane-dye-without-peel/rule.ts';
+import { rule as mixingAgainstConcentration } from './rules/mixing-against-concentration/rule.ts';
 import { rule as muscleOffTheSegment } from './rules/muscle-off-the-segment/rule.ts';
 import { rule as musclesAgainstBand } from './rules/muscles-against-band/rule.ts';
+import { rule as needleBlockAnticoagulated } from './rules/needle-block-anticoagulated/rule.ts';
 import { rule as nitrousOxideAndGas } from './rules/nitrous-oxide-and-gas/rule.ts';
 import { rule as nitrousOxideStoppedOutsideOperation } from './rules/nitrous-oxide-stopped-outside-operation/rule.ts';
 import { rule as nitrousOxideToTheEnd } from './rules/nitrous-oxide-to-the-end/rule.ts';
+import { rule as noAntisepsis } from './rules/no-antisepsis/rule.ts';
+import { rule as noFlyingDateWithoutGas } from './rules/no-flying-date-without-gas/rule.ts';
 import { rule as noneBesideOthers } from './rules/none-beside-others/rule.ts';
 import { rule as oilInAphakicEye } from './rules/oil-in-aphakic-eye/rule.ts';
+import { rule as oilRemovalFarOff } from './rules/oil-removal-far-off/rule.ts';
+import { rule as oilRemovalWithoutOil } from './rules/oil-removal-without-oil/rule.ts';
+import { rule as oilViscosityUnusual } from './rules/oil-viscosity-unusual/rule.ts';
 import { rule as oilWithoutRemovalPlan } from './rules/oil-without-removal-plan/rule.ts';
 import { rule as oilWithoutViscosity } from './rules/oil-without-viscosity/rule.ts';
 import { rule as onePersonInTwoRoles } from './rules/one-person-in-two-roles/rule.ts';
 import { rule as openingAndClosureMissing } from './rules/opening-and-closure-missing/rule.ts';
 import { rule as outcomeNotAmongComplications } from './rules/outcome-not-among-complications/rule.ts';
+import { rule as paracentesisNotDoneWithVolume } from './rules/paracentesis-not-done-with-volume/rule.ts';
 import { rule as performedAgainstStages } from './rules/performed-against-stages/rule.ts';
 import { rule as perfusionNotRecorded } from './rules/perfusion-not-recorded/rule.ts';
 import { rule as planChangedWithoutReason } from './rules/plan-changed-without-reason/rule.ts';
@@ -145,8 +168,12 @@ import { rule as portsUnusual } from './rules/ports-unusual/rule.ts';
 import { rule as postureHoursDoNotAddUp } from './rules/posture-hours-do-not-add-up/rule.ts';
 import { rule as postureLeavesBreakDry } from './rules/posture-leaves-break-dry/rule.ts';
 import { rule as postureOnWrongSide } from './rules/posture-on-wrong-side/rule.ts';
+import { rule as postureOutlastsGas } from './rules/posture-outlasts-gas/rule.ts';
 import { rule as postureWithoutDuration } from './rules/posture-without-duration/rule.ts';
+import { rule as postureWithoutPosition } from './rules/posture-without-position/rule.ts';
+import { rule as postureWithoutTamponade } from './rules/posture-without-tamponade/rule.ts';
 import { rule as preoperativeDiagnosisNotBorneOut } from './rules/preoperative-diagnosis-not-borne-out/rule.ts';
+import { rule as prescribedTwice } from './rules/prescribed-twice/rule.ts';
 import { rule as pressureAtEnd } from './rules/pressure-at-end/rule.ts';
 import { rule as pseudophakicWithoutCataractSurgery } from './rules/pseudophakic-without-cataract-surgery/rule.ts';
 import { rule as pureGasAtFullFill } from './rules/pure-gas-at-full-fill/rule.ts';
@@ -159,6 +186,7 @@ import { rule as referrerMissing } from './rules/referrer-missing/rule.ts';
 import { rule as referrerWithoutName } from './rules/referrer-without-name/rule.ts';
 import { rule as refractionAgainstAxialLength } from './rules/refraction-against-axial-length/rule.ts';
 import { rule as refractionNotTold } from './rules/refraction-not-told/rule.ts';
+import { rule as relatedMedicineAfterAllergy } from './rules/related-medicine-after-allergy/rule.ts';
 import { rule as removalPlannedOfPermanentElement } from './rules/removal-planned-of-permanent-element/rule.ts';
 import { rule as requiredAftercare } from './rules/required-aftercare/rule.ts';
 import { rule as requiredAnaesthesia } from './rules/required-anaesthesia/rule.ts';
@@ -184,6 +212,7 @@ import { rule as shortenedWithoutRing } from './rules/shortened-without-ring/rul
 import { rule as sideDiffers } from './rules/side-differs/rule.ts';
 import { rule as siliconeImplantWithOil } from './rules/silicone-implant-with-oil/rule.ts';
 import { rule as smallHyperopicEye } from './rules/small-hyperopic-eye/rule.ts';
+import { rule as specimenIncomplete } from './rules/specimen-incomplete/rule.ts';
 import { rule as steroidAndAntibioticMissing } from './rules/steroid-and-antibiotic-missing/rule.ts';
 import { rule as supervisionIncomplete } from './rules/supervision-incomplete/rule.ts';
 import { rule as supervisorForTrainee } from './rules/supervisor-for-trainee/rule.ts';
@@ -200,6 +229,7 @@ import { rule as tightenedWithoutPressure } from './rules/tightened-without-pres
 import { rule as timeOutAfterStart } from './rules/time-out-after-start/rule.ts';
 import { rule as timeOutNotTimed } from './rules/time-out-not-timed/rule.ts';
 import { rule as tissueAgainstSteps } from './rules/tissue-against-steps/rule.ts';
+import { rule as totalAgainstArc } from './rules/total-against-arc/rule.ts';
 import { rule as totalDetachmentMaculaOn } from './rules/total-detachment-macula-on/rule.ts';
 import { rule as traineeWithoutSupervisor } from './rules/trainee-without-supervisor/rule.ts';
 import { rule as treatedBreakNotAmongTargets } from './rules/treated-break-not-among-targets/rule.ts';
@@ -220,6 +250,7 @@ export const rules: readonly Rule[] = [
   acuityAgainstMacula,
   agentExchangeMismatch,
   allergyAgainstMedicine,
+  aminoglycosideInsideEye,
   anaesthetistMissing,
   arcAgainstRole,
   assistantWithoutPart,
@@ -238,6 +269,10 @@ export const rules: readonly Rule[] = [
   bleedingRiskExternalDrainage,
   blockAgainstAnaesthesia,
   blockEyeMissing,
+  blockVolumeUnusual,
+  blockWithoutAgent,
+  bloodLossAgainstFigure,
+  bloodLossUnusual,
   bornAfterSurgery,
   breakAsLargeAsGiantTear,
   breakEdgesCrossed,
@@ -249,6 +284,7 @@ export const rules: readonly Rule[] = [
   breakWithoutRetinopexy,
   breaksInSerousDetachment,
   broadElementInOlderPatient,
+  bubbleSmallerThanBreak,
   buckleWithoutOpening,
   cephalosporinAfterPenicillinAllergy,
   clockOutsideQuadrant,
@@ -256,9 +292,12 @@ export const rules: readonly Rule[] = [
   closureMaterialMissing,
   closureOnOpenElement,
   complicationWithoutAction,
+  complicationWithoutKind,
   complicationsAgainstOutcome,
+  concentrationLow,
   conjunctivaOpenedNotClosed,
   countDiscrepancyOpen,
+  countsCorrectWithDiscrepancy,
   dateOutOfOrder,
   detachmentLeftOpen,
   detachmentSurgeryRepeated,
@@ -275,6 +314,7 @@ export const rules: readonly Rule[] = [
   drainageWithoutOutcome,
   drainedThroughMissingBreak,
   dropWithoutDose,
+  dropWithoutEye,
   earlierSurgeryOnOtherEyeOnly,
   elementAwayFromBreak,
   elementFixedByNothing,
@@ -285,6 +325,7 @@ export const rules: readonly Rule[] = [
   elementWithoutSize,
   endolaserWithoutVitrectomy,
   endsBeforeStart,
+  exchangeWithoutVitrectomy,
   expansileConcentration,
   expiredImplant,
   extentAgainstQuadrants,
@@ -292,6 +333,7 @@ export const rules: readonly Rule[] = [
   fixationIncomplete,
   fixationOffTheElement,
   fixedDateForFlying,
+  flatOnBackWithGas,
   fluidAgainstFlat,
   fluidLeftWhereMissing,
   flyingBeforeGasGone,
@@ -309,6 +351,7 @@ export const rules: readonly Rule[] = [
   heavyLiquidLeftLong,
   heavyLiquidUnderRetinaNotUsed,
   heavyLiquidUseNotRecorded,
+  heavyOilBreaksAbove,
   heavyOilFaceDown,
   heightAboveBound,
   highPressureWithoutPerfusion,
@@ -330,6 +373,7 @@ export const rules: readonly Rule[] = [
   lensTouchWithoutLens,
   lensWorkAgainstLens,
   lincoffRule,
+  localAnaestheticStrength,
   lowerBreaksLightTamponadeUpright,
   maculaOffBeforeSymptoms,
   maculaOffDurationMissing,
@@ -339,19 +383,28 @@ export const rules: readonly Rule[] = [
   markNotRecorded,
   measuredBloodLossMissing,
   medicineGivenOutsideOperation,
+  medicineIncomplete,
   membraneDyeWithoutPeel,
+  mixingAgainstConcentration,
   muscleOffTheSegment,
   musclesAgainstBand,
+  needleBlockAnticoagulated,
   nitrousOxideAndGas,
   nitrousOxideStoppedOutsideOperation,
   nitrousOxideToTheEnd,
+  noAntisepsis,
+  noFlyingDateWithoutGas,
   noneBesideOthers,
   oilInAphakicEye,
+  oilRemovalFarOff,
+  oilRemovalWithoutOil,
+  oilViscosityUnusual,
   oilWithoutRemovalPlan,
   oilWithoutViscosity,
   onePersonInTwoRoles,
   openingAndClosureMissing,
   outcomeNotAmongComplications,
+  paracentesisNotDoneWithVolume,
   performedAgainstStages,
   perfusionNotRecorded,
   planChangedWithoutReason,
@@ -362,8 +415,12 @@ export const rules: readonly Rule[] = [
   postureHoursDoNotAddUp,
   postureLeavesBreakDry,
   postureOnWrongSide,
+  postureOutlastsGas,
   postureWithoutDuration,
+  postureWithoutPosition,
+  postureWithoutTamponade,
   preoperativeDiagnosisNotBorneOut,
+  prescribedTwice,
   pressureAtEnd,
   pseudophakicWithoutCataractSurgery,
   pureGasAtFullFill,
@@ -376,6 +433,7 @@ export const rules: readonly Rule[] = [
   referrerWithoutName,
   refractionAgainstAxialLength,
   refractionNotTold,
+  relatedMedicineAfterAllergy,
   removalPlannedOfPermanentElement,
   requiredAftercare,
   requiredAnaesthesia,
@@ -401,6 +459,7 @@ export const rules: readonly Rule[] = [
   sideDiffers,
   siliconeImplantWithOil,
   smallHyperopicEye,
+  specimenIncomplete,
   steroidAndAntibioticMissing,
   supervisionIncomplete,
   supervisorForTrainee,
@@ -417,6 +476,7 @@ export const rules: readonly Rule[] = [
   timeOutAfterStart,
   timeOutNotTimed,
   tissueAgainstSteps,
+  totalAgainstArc,
   totalDetachmentMaculaOn,
   traineeWithoutSupervisor,
   treatedBreakNotAmongTargets,

@@ -1,5 +1,6 @@
 import { defineRule } from '../../define-rule.ts';
-import { allergiesOf, dropsOf, medicinesOf, tabletsOf } from '../../facts.ts';
+import { allergiesOf, capital } from '../../facts.ts';
+import { givenIn, isSameMedicine } from '../../given.ts';
 
 export const rule = defineRule({
   id: 'allergy-against-medicine',
@@ -10,47 +11,25 @@ export const rule = defineRule({
   source: { text: 'Trade practice', certainty: 'P' },
   answerable: false,
   check: (record) => {
-    const allergies = allergiesOf(record).flatMap(({ substance }) =>
-      substance === undefined ? [] : [substance.toLowerCase()],
+    const substances = allergiesOf(record).flatMap(({ substance }) =>
+      substance === undefined ? [] : [substance],
     );
-    if (allergies.length === 0) return [];
-    const classes: readonly (readonly [RegExp, RegExp])[] = [
-      [/penicillin|amoxicillin|flucloxacillin/, /penicillin|amoxicillin|flucloxacillin|co-amoxiclav/],
-      [/cephalosporin|cefuroxime|cefazolin/, /cef\w+|cephal\w+/],
-      [/iodine|povidone/, /povidone|iodine/],
-      [/chlorhexidine/, /chlorhexidine/],
-      [/sulph?a|sulfonamide|sulphonamide/, /acetazolamide|dorzolamide|brinzolamide|sulf\w+mide/],
-      [/aminoglycoside|gentamicin|neomycin/, /gentamicin|neomycin|tobramycin/],
-      [/quinolone|floxacin/, /\w+floxacin/],
-      [/nsaid|aspirin|ibuprofen/, /aspirin|ibuprofen|ketorolac|diclofenac|bromfenac|nepafenac/],
-    ];
-    const given = [
-      ...medicinesOf(record).map(({ drug }, index) => ({ drug, field: `endOfCase.medicines.${index}.drug` })),
-      ...dropsOf(record).map(({ drug }, index) => ({ drug, field: `aftercare.drops.${index}.drug` })),
-      ...tabletsOf(record).map(({ drug }, index) => ({ drug, field: `aftercare.tablets.${index}.drug` })),
-      { drug: record.anaesthesia?.antisepsis, field: 'anaesthesia.antisepsis' },
-    ];
-    return given.flatMap(({ drug, field }) => {
-      const name = drug?.toLowerCase();
-      if (name === undefined || name === 'none') return [];
-      const allergy = allergies.find(
-        (substance) =>
-          name.includes(substance) || classes.some(([of, covers]) => of.test(substance) && covers.test(name)),
-      );
-      return allergy === undefined
-        ? []
-        : [
-            {
-              fields: [field, 'who.patient.allergies'],
-              message: `${drug?.replace(/^./, (c) => c.toUpperCase())} is recorded as given or prescribed; the patient is allergic to ${allergy}.`,
-            },
-          ];
+    if (substances.length === 0) return [];
+    return givenIn(record).flatMap(({ drug, field, verb }) => {
+      const allergy = substances.find((substance) => isSameMedicine(substance, drug));
+      if (allergy === undefined) return [];
+      return [
+        {
+          fields: [field, 'who.patient.allergies'],
+          message: `${capital(drug)} is recorded as ${verb}; the patient is allergic to ${allergy}.`,
+        },
+      ];
     });
   },
   examples: {
     fires: [
       {
-        name: 'the same substance',
+        name: 'the same drug',
         fields: 'aftercare.drops.0.drug',
         record: {
           who: { patient: { allergies: [{ substance: 'chloramphenicol' }] } },
@@ -65,6 +44,22 @@ export const rule = defineRule({
           anaesthesia: { antisepsis: 'povidone-iodine' },
         },
       },
+      {
+        name: 'one of the class',
+        fields: 'endOfCase.medicines.0.drug',
+        record: {
+          who: { patient: { allergies: [{ substance: 'cephalosporins' }] } },
+          endOfCase: { medicines: [{ drug: 'Cefuroxime' }] },
+        },
+      },
+      {
+        name: 'in the block',
+        fields: 'anaesthesia.agents.0.drug',
+        record: {
+          who: { patient: { allergies: [{ substance: 'lidocaine' }] } },
+          anaesthesia: { agents: [{ drug: 'Lidocaine' }] },
+        },
+      },
     ],
     silent: [
       {
@@ -72,6 +67,27 @@ export const rule = defineRule({
         record: {
           who: { patient: { allergies: [{ substance: 'penicillin' }] } },
           aftercare: { drops: [{ drug: 'Chloramphenicol' }] },
+        },
+      },
+      {
+        name: 'iodinated contrast is not the antiseptic',
+        record: {
+          who: { patient: { allergies: [{ substance: 'iodine contrast medium' }] } },
+          anaesthesia: { antisepsis: 'povidone-iodine' },
+        },
+      },
+      {
+        name: 'latex',
+        record: {
+          who: { patient: { allergies: [{ substance: 'latex' }] } },
+          endOfCase: { medicines: [{ drug: 'Cefuroxime' }] },
+        },
+      },
+      {
+        name: 'a salt named like another class',
+        record: {
+          who: { patient: { allergies: [{ substance: 'morphine sulphate' }] } },
+          aftercare: { tablets: [{ drug: 'Acetazolamide' }] },
         },
       },
     ],

@@ -13,9 +13,8 @@ export const rule = defineRule({
   check: (record) => {
     const arc = detachedArcOf(record);
     const { recurrent, previousOperations, diagnosis } = record.before ?? {};
-    if (arc === undefined) return [];
-    const from = arc === 'all' ? 12 : arc.from;
-    const to = arc === 'all' ? 12 : arc.to;
+    if (arc === undefined || arc === 'all') return [];
+    const { from, to } = arc;
     // An older buckle, laser or scar holds retina flat inside a detachment.
     const untouched = recurrent === false && previousOperations === 'none' && diagnosis === 'rhegmatogenous';
     return breaksOf(record).flatMap(({ clock, kind, onDetachedRetina, extentClockHours }, index) => {
@@ -27,13 +26,12 @@ export const rule = defineRule({
       )
         return [];
       const half = (extentClockHours ?? 6) / 2;
-      const inside = arc === 'all' || onArc(clock, arc);
-      const depth = arc === 'all' ? 12 : Math.min(hoursApart(clock, from), hoursApart(clock, to));
+      const inside = onArc(clock, arc);
+      const depth = Math.min(hoursApart(clock, from), hoursApart(clock, to));
       const outside = onDetachedRetina && !inside && depth > half + 0.5;
       const within =
         !onDetachedRetina && untouched && extentClockHours !== undefined && inside && depth > half + 1;
       if (!outside && !within) return [];
-      const extent = arc === 'all' ? 'is total' : `extends from ${showClock(from)} to ${showClock(to)}`;
       return [
         {
           fields: [
@@ -41,7 +39,7 @@ export const rule = defineRule({
             `breaks.found.${index}.clock`,
             'before.detachmentFromClock',
           ],
-          message: `Break ${index + 1} at ${showClock(clock)} is recorded as on ${outside ? 'detached' : 'attached'} retina; the detachment ${extent}.`,
+          message: `Break ${index + 1} at ${showClock(clock)} is recorded as on ${outside ? 'detached' : 'attached'} retina; the detachment extends from ${showClock(from)} to ${showClock(to)}.`,
         },
       ];
     });

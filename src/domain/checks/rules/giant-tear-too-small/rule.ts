@@ -19,7 +19,7 @@ export const rule = defineRule({
         : [
             {
               fields: [`breaks.found.${index}.extentClockHours`, `breaks.found.${index}.kind`],
-              message: `Break ${index + 1} is called a giant tear and extends over ${numberWords(extentClockHours)} clock hours; a giant tear has 3 or more.`,
+              message: `Break ${index + 1} is called a giant tear and extends over ${numberWords(extentClockHours)} clock hours; a giant tear has 3 clock hours or more.`,
             },
           ],
     ),

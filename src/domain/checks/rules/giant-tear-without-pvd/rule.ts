@@ -15,7 +15,7 @@ export const rule = defineRule({
   check: (record) => {
     const index = breaksOf(record).findIndex(({ kind }) => kind === 'giant-tear');
     if (index < 0 || record.before?.posteriorVitreousDetachment !== 'none') return [];
-    const message = `Break ${index + 1} is called a giant tear, and the posterior vitreous is recorded as not detached.`;
+    const message = `Break ${index + 1} is called a giant retinal tear, and the posterior vitreous is recorded as not detached.`;
     return [{ fields: [`breaks.found.${index}.kind`, 'before.posteriorVitreousDetachment'], message }];
   },
   examples: {

@@ -23,7 +23,9 @@ export const rule = defineRule({
       ];
     }
     const planned = record.vitreous?.heavyLiquidRemovalPlannedOn;
-    return planned === undefined || at >= 0
+    // A drop that was left under the retina may yet be taken out.
+    const open = liquid === 'removed' && record.endOfCase?.complications !== 'none';
+    return planned === undefined || open
       ? []
       : [
           {

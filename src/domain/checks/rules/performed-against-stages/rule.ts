@@ -1,5 +1,6 @@
 import { defineRule } from '../../define-rule.ts';
-import { elementsOf, gasOf, labelOf, oilOf, treatmentsOf } from '../../facts.ts';
+import { labelOf, listWords } from '../../facts.ts';
+import { recordedProcedures } from '../../procedures-recorded.ts';
 
 export const rule = defineRule({
   id: 'performed-against-stages',
@@ -9,53 +10,14 @@ export const rule = defineRule({
   why: 'The coder and the register read the list, the surgeon writes the stages.',
   source: { text: '42 CFR 482.51(b)(6), tag A-0959: name of the procedure', certainty: 'R2' },
   answerable: false,
+  unless: ['pneumatic-with-vitrectomy'],
   check: (record) => {
     const performed = record.who?.performed;
     if (performed === undefined) return [];
-    const elements = record.buckle?.elements;
-    const roles = elementsOf(record).map(({ role }) => role);
-    const agent = record.tamponade?.agent;
-    const treatments = record.retinopexy?.treatments;
-    const modalities = treatmentsOf(record).map(({ modality }) => modality);
-    const lasers = modalities.some((one) => one?.includes('laser') === true);
-    const rolesKnown = elements === 'none' || (elements !== undefined && !roles.includes(undefined));
-    const modalitiesKnown =
-      treatments === 'none' || (treatments !== undefined && !modalities.includes(undefined));
-    const kind = record.drainage?.kind;
-    const facts = [
-      { procedure: 'vitrectomy', done: record.vitreous?.vitrectomy, field: 'vitreous.vitrectomy' },
-      {
-        procedure: 'encircling-band',
-        done: rolesKnown ? roles.includes('encircling') : undefined,
-        field: 'buckle.elements',
-      },
-      {
-        procedure: 'gas',
-        done: agent === undefined ? undefined : gasOf(record) !== undefined,
-        field: 'tamponade.agent',
-      },
-      {
-        procedure: 'oil',
-        done: agent === undefined ? undefined : oilOf(record) !== undefined,
-        field: 'tamponade.agent',
-      },
-      {
-        procedure: 'external-drainage',
-        done: kind === undefined ? undefined : kind === 'external' || kind === 'both',
-        field: 'drainage.kind',
-      },
-      {
-        procedure: 'cryotherapy',
-        done: modalitiesKnown ? modalities.includes('cryo') : undefined,
-        field: 'retinopexy.treatments',
-      },
-      { procedure: 'laser', done: modalitiesKnown ? lasers : undefined, field: 'retinopexy.treatments' },
-    ] as const;
-    const wrong = facts.filter(({ procedure, done }) => {
+    const wrong = recordedProcedures(record).filter(({ procedure, done, listedOnly }) => {
       const listed = performed.includes(procedure);
-      if (procedure === 'gas' && (agent === 'air' || performed.includes('pneumatic-retinopexy')))
-        return false;
-      return done !== undefined && listed !== done;
+      if (done === undefined || listed === done) return false;
+      return listed || listedOnly !== true;
     });
     if (wrong.length === 0) return [];
     const parts = wrong.map(({ procedure, done }) => {
@@ -67,7 +29,7 @@ export const rule = defineRule({
     return [
       {
         fields: ['who.performed', ...wrong.map(({ field }) => field)],
-        message: `Procedures performed: ${parts.join('; ')}.`,
+        message: `Procedures performed are listed as ${listWords(performed.map((one) => labelOf('who.performed', one)))}; ${parts.join('; ')}.`,
       },
     ];
   },
@@ -79,18 +41,60 @@ export const rule = defineRule({
         record: { who: { performed: ['vitrectomy'] }, vitreous: { vitrectomy: false } },
       },
       {
-        name: 'oil in, gas listed',
+        name: 'band done, not listed',
         fields: 'who.performed',
-        record: { who: { performed: ['gas'] }, tamponade: { agent: 'silicone-oil' } },
+        record: { who: { performed: ['vitrectomy'] }, buckle: { elements: [{ role: 'encircling' }] } },
+      },
+      {
+        name: 'peel listed, nothing peeled',
+        fields: 'who.performed',
+        record: { who: { performed: ['membrane-peel'] }, vitreous: { membranesPeeled: ['none'] } },
+      },
+      {
+        name: 'lens taken out, not listed',
+        fields: 'who.performed',
+        record: {
+          who: { performed: ['vitrectomy'] },
+          vitreous: { vitrectomy: true, lensWork: 'lensectomy' },
+        },
+      },
+      {
+        name: 'retinectomy not listed',
+        fields: 'who.performed',
+        record: {
+          who: { performed: ['vitrectomy'] },
+          vitreous: { vitrectomy: true, retinotomies: [{ kind: 'retinectomy' }] },
+        },
       },
     ],
     silent: [
       {
-        name: 'agree',
+        name: 'as listed',
         record: {
           who: { performed: ['vitrectomy', 'gas'] },
           vitreous: { vitrectomy: true },
           tamponade: { agent: 'SF6' },
+        },
+      },
+      {
+        name: 'a drainage retinotomy is part of the vitrectomy',
+        record: {
+          who: { performed: ['vitrectomy'] },
+          vitreous: { vitrectomy: true, retinotomies: [{ kind: 'drainage' }] },
+        },
+      },
+      {
+        name: 'a radial element under the band',
+        record: {
+          who: { performed: ['encircling-band'] },
+          buckle: { elements: [{ role: 'encircling' }, { role: 'meridional' }] },
+        },
+      },
+      {
+        name: 'limiting membrane peeled in a vitrectomy',
+        record: {
+          who: { performed: ['vitrectomy'] },
+          vitreous: { vitrectomy: true, membranesPeeled: ['ilm'] },
         },
       },
     ],

@@ -24,14 +24,14 @@ export const rule = defineRule({
       return [
         {
           fields: ['breaks.found'],
-          message: `Pneumatic retinopexy with a break at ${listWords(low.map(showClock))}; the usual limit is from 8 to 4 o’clock through 12.`,
+          message: `Pneumatic retinopexy with a break at ${listWords(low.map(showClock))}; the usual limits are 8 o’clock and 4 o’clock, through 12 o’clock.`,
         },
       ];
     if (spread > 1.5)
       return [
         {
           fields: ['breaks.found'],
-          message: `Pneumatic retinopexy with breaks ${numberWords(spread)} clock hours apart; the usual limit is 1.`,
+          message: `Pneumatic retinopexy with breaks ${numberWords(spread)} clock hours apart; the usual limit is 1 clock hour.`,
         },
       ];
     return [];

@@ -4,11 +4,11 @@ import { numberWords, posturesOf } from '../../facts.ts';
 export const rule = defineRule({
   id: 'posture-hours-do-not-add-up',
   family: 'posture',
-  level: 'contradiction',
+  level: 'caution',
   title: 'Postures of more than 24 hours a day',
   why: 'The patient cannot do it.',
   source: { text: 'A day has 24 hours', certainty: 'C' },
-  answerable: false,
+  answerable: true,
   check: (record) => {
     const postures = posturesOf(record);
     const hours = postures.reduce((sum, { hoursADay = 0 }) => sum + hoursADay, 0);
@@ -17,7 +17,7 @@ export const rule = defineRule({
     return [
       {
         fields: postures.map((_, index) => `aftercare.posture.${index}.hoursADay`),
-        message: `The postures add up to ${numberWords(hours)} hours a day.`,
+        message: `The postures add up to ${numberWords(hours)} hours a day, if they are kept on the same days.`,
       },
     ];
   },

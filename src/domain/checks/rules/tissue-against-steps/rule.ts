@@ -1,5 +1,5 @@
 import { defineRule } from '../../define-rule.ts';
-import { capital } from '../../facts.ts';
+import { labelOf, listWords } from '../../facts.ts';
 
 export const rule = defineRule({
   id: 'tissue-against-steps',
@@ -31,15 +31,12 @@ export const rule = defineRule({
     ] as const;
     const wrong = facts.filter(({ what, done }) => done !== undefined && tissue.includes(what) !== done);
     if (wrong.length === 0) return [];
-    const parts = wrong.map(({ what, done, step }) =>
-      done === true
-        ? `${step} is recorded, and ${what} is not among the tissue removed`
-        : `${what} is among the tissue removed, and ${step} is recorded as not done`,
-    );
+    const removed = listWords(tissue.map((one) => labelOf('endOfCase.tissue', one)));
+    const parts = wrong.map(({ done, step }) => `${step} as ${done === true ? 'done' : 'not done'}`);
     return [
       {
         fields: ['endOfCase.tissue', ...wrong.map(({ field }) => field)],
-        message: `${capital(parts.join('; '))}.`,
+        message: `Tissue removed is recorded as ${removed}; ${listWords(parts)}.`,
       },
     ];
   },

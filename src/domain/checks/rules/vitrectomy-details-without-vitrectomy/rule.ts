@@ -1,5 +1,5 @@
 import { defineRule } from '../../define-rule.ts';
-import { listWords, numberIn, retinotomiesOf } from '../../facts.ts';
+import { labelOf, listWords, numberIn, retinotomiesOf } from '../../facts.ts';
 
 export const rule = defineRule({
   id: 'vitrectomy-details-without-vitrectomy',
@@ -12,7 +12,7 @@ export const rule = defineRule({
   check: (record) => {
     const { vitreous } = record;
     if (vitreous?.vitrectomy !== false) return [];
-    const peeled = vitreous.membranesPeeled?.some((one) => one !== 'none') === true;
+    const peeled = (vitreous.membranesPeeled ?? []).filter((one) => one !== 'none');
     const steps = [
       numberIn(vitreous.ports) !== undefined && vitreous.ports !== 0
         ? { field: 'vitreous.ports', what: `${vitreous.ports} ports` }
@@ -20,12 +20,20 @@ export const rule = defineRule({
       vitreous.baseShaved?.startsWith('shaved') === true
         ? { field: 'vitreous.baseShaved', what: 'a shaved vitreous base' }
         : undefined,
-      peeled ? { field: 'vitreous.membranesPeeled', what: 'membranes peeled' } : undefined,
+      peeled.length > 0
+        ? {
+            field: 'vitreous.membranesPeeled',
+            what: `${listWords(peeled.map((one) => labelOf('vitreous.membranesPeeled', one)))} peeled`,
+          }
+        : undefined,
       retinotomiesOf(record).length > 0
         ? { field: 'vitreous.retinotomies', what: 'a retinotomy' }
         : undefined,
       vitreous.heavyLiquid !== undefined && vitreous.heavyLiquid !== 'none'
-        ? { field: 'vitreous.heavyLiquid', what: 'heavy liquid' }
+        ? {
+            field: 'vitreous.heavyLiquid',
+            what: `heavy liquid ${labelOf('vitreous.heavyLiquid', vitreous.heavyLiquid)}`,
+          }
         : undefined,
     ].filter((one) => one !== undefined);
     if (steps.length === 0) return [];
