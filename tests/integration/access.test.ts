@@ -1,3 +1,4 @@
+import { readdirSync } from 'node:fs';
 import pg from 'pg';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { type Action, may, type Role, roles } from '../../src/domain/access/policy.ts';
@@ -53,6 +54,26 @@ const places: readonly { method: string; path: () => string; action: Action }[] 
   { method: 'GET', path: () => `/api/letters/${unknown}/letter.docx`, action: 'letter:read' },
   { method: 'GET', path: () => '/api/coding/export.csv', action: 'codes:export' },
 ];
+
+/** Files under src/pages that anybody may open, or that send everybody to their own desk. */
+const open = ['403.astro', '404.astro', 'index.astro', 'sign-in.astro', 'sign-out.ts'];
+
+const fileOf = (path: string): string => {
+  const parts = path.slice(1).replaceAll(caseId, '[id]').replaceAll(unknown, '[id]');
+  return parts.startsWith('api/') ? `${parts}.ts` : `${parts}.astro`;
+};
+
+it('tries every page and route that there is', () => {
+  const files = readdirSync(new URL('../../src/pages', import.meta.url), {
+    recursive: true,
+    withFileTypes: true,
+  })
+    .filter((entry) => entry.isFile())
+    .map((entry) => `${entry.parentPath}/${entry.name}`.split('/src/pages/')[1] ?? '')
+    .map((file) => file.replace('/index.', '.'));
+  const tried = new Set([...open, ...places.map(({ path }) => fileOf(path()))]);
+  expect(files.filter((file) => !tried.has(file))).toEqual([]);
+});
 
 describe.each(roles)('%s', (role) => {
   it('goes where the policy table lets them, and nowhere else', async () => {

@@ -1,6 +1,8 @@
 import type Handlebars from 'handlebars/runtime';
 import { clockwise } from '../anatomy/clock.ts';
-import type { BuckleElement, Fixation } from '../record/schema.ts';
+import { gasFacts, isGas, spanDays } from '../physics/gas.ts';
+import { publishedBand } from '../physics/refraction.ts';
+import type { BuckleElement, CaseRecord, Fixation } from '../record/schema.ts';
 import {
   clockWords,
   countWords,
@@ -96,6 +98,33 @@ const courseWords = (times: unknown, weeks: unknown): string => {
   return [often, long].filter((part) => part !== '').join(' ');
 };
 
+/** "about 9 to 19 days", from the published half-lives and spans. */
+const gasSpan = (tamponade: unknown, lens: unknown): string => {
+  if (typeof tamponade !== 'object' || tamponade === null) return '';
+  const { agent, concentrationPercent, mixing } = tamponade as NonNullable<CaseRecord['tamponade']>;
+  if (!isGas(agent)) return '';
+  const percent =
+    mixing === 'pure'
+      ? 100
+      : isNumber(concentrationPercent)
+        ? concentrationPercent
+        : gasFacts[agent].isoexpansile.usual;
+  const { low, high } = spanDays(agent, percent, lens === 'aphakic' ? 'aphakic' : 'phakic');
+  return high < 21
+    ? `about ${Math.round(low)} to ${Math.round(high)} days`
+    : `about ${Math.max(1, Math.round(low / 7))} to ${Math.round(high / 7)} weeks`;
+};
+
+/** "1.3 to 2.8 dioptres", what published encircling bands did to the refraction; nothing for a band that was not tightened. */
+const bandShift = (elements: unknown): string => {
+  if (!isList(elements)) return '';
+  const tight = (elements as readonly BuckleElement[]).some(
+    ({ role, shortenedMm }) => role === 'encircling' && (shortenedMm ?? 0) > 0,
+  );
+  const [most, least] = publishedBand.shiftDioptres;
+  return tight ? `${numberWords(-least)} to ${numberWords(-most)} dioptres` : '';
+};
+
 /** Small decisions on values, so that templates hold words only. */
 export const helpers = {
   is: (a: unknown, b: unknown) => a === b,
@@ -129,6 +158,8 @@ export const helpers = {
   fixation: fixationWords,
   closing: closingWords,
   course: courseWords,
+  gasSpan,
+  bandShift,
   otherEye: (eye: unknown) => (eye === 'right' ? 'left' : 'right'),
   numbered: (list: unknown, one: string, many: string) =>
     isList(list) ? `${list.length === 1 ? one : many} ${listWords(list.map(String))}` : '',

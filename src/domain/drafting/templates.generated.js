@@ -1,5 +1,5 @@
 // Made from templates/ by scripts/templates.ts; do not edit.
-export const TEMPLATES_VERSION = '3308704adbf3';
+export const TEMPLATES_VERSION = '21d08a82d082';
 export const notes = {
   "operative-note": {"0":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -3480,13 +3480,15 @@ export const letters = {
 
   return ((stack1 = lookupProperty(helpers,"statement").call(alias1,"gas",{"name":"statement","hash":{},"fn":container.program(21, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":13,"column":0},"end":{"line":13,"column":309}}})) != null ? stack1 : "")
     + "\n"
-    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"flying",{"name":"statement","hash":{},"fn":container.program(25, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":14,"column":0},"end":{"line":14,"column":267}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"span",{"name":"statement","hash":{},"fn":container.program(25, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":14,"column":0},"end":{"line":14,"column":227}}})) != null ? stack1 : "")
     + "\n"
-    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"anaesthetic",{"name":"statement","hash":{},"fn":container.program(27, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":15,"column":0},"end":{"line":15,"column":342}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"flying",{"name":"statement","hash":{},"fn":container.program(27, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":15,"column":0},"end":{"line":15,"column":267}}})) != null ? stack1 : "")
     + "\n"
-    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"wristband",{"name":"statement","hash":{},"fn":container.program(29, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":16,"column":0},"end":{"line":16,"column":106}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"anaesthetic",{"name":"statement","hash":{},"fn":container.program(29, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":16,"column":0},"end":{"line":16,"column":342}}})) != null ? stack1 : "")
     + "\n"
-    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"oil",{"name":"statement","hash":{},"fn":container.program(31, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":17,"column":0},"end":{"line":17,"column":205}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"wristband",{"name":"statement","hash":{},"fn":container.program(31, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":17,"column":0},"end":{"line":17,"column":106}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"oil",{"name":"statement","hash":{},"fn":container.program(33, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":18,"column":0},"end":{"line":18,"column":205}}})) != null ? stack1 : "")
     + "\n";
 },"21":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -3520,9 +3522,18 @@ export const letters = {
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"any").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"air",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":14,"column":34},"end":{"line":14,"column":60}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"SF6",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":14,"column":61},"end":{"line":14,"column":87}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"C2F6",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":14,"column":88},"end":{"line":14,"column":115}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"C3F8",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":14,"column":116},"end":{"line":14,"column":143}}}),{"name":"any","hash":{},"data":data,"loc":{"start":{"line":14,"column":29},"end":{"line":14,"column":144}}}),{"name":"if","hash":{},"fn":container.program(26, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":14,"column":23},"end":{"line":14,"column":253}}})) != null ? stack1 : "");
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"gasSpan").call(alias1,(depth0 != null ? lookupProperty(depth0,"tamponade") : depth0),((stack1 = (depth0 != null ? lookupProperty(depth0,"before") : depth0)) != null ? lookupProperty(stack1,"lens") : stack1),{"name":"gasSpan","hash":{},"data":data,"loc":{"start":{"line":14,"column":27},"end":{"line":14,"column":58}}}),{"name":"if","hash":{},"fn":container.program(26, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":14,"column":21},"end":{"line":14,"column":213}}})) != null ? stack1 : "");
 },"26":function(container,depth0,helpers,partials,data) {
-    return "do not fly and do not travel up mountains until your eye surgeon has confirmed that the gas has gone";
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "how long it lasts differs from eye to eye: "
+    + ((stack1 = lookupProperty(helpers,"gasSpan").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"tamponade") : depth0),((stack1 = (depth0 != null ? lookupProperty(depth0,"before") : depth0)) != null ? lookupProperty(stack1,"lens") : stack1),{"name":"gasSpan","hash":{},"data":data,"loc":{"start":{"line":14,"column":103},"end":{"line":14,"column":136}}})) != null ? stack1 : "")
+    + " is usual, an estimate, and only an examination shows that it has gone";
 },"27":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -3531,21 +3542,10 @@ export const letters = {
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"any").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"air",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":15,"column":39},"end":{"line":15,"column":65}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"SF6",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":15,"column":66},"end":{"line":15,"column":92}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"C2F6",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":15,"column":93},"end":{"line":15,"column":120}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"C3F8",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":15,"column":121},"end":{"line":15,"column":148}}}),{"name":"any","hash":{},"data":data,"loc":{"start":{"line":15,"column":34},"end":{"line":15,"column":149}}}),{"name":"if","hash":{},"fn":container.program(28, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":15,"column":28},"end":{"line":15,"column":328}}})) != null ? stack1 : "");
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"any").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"air",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":15,"column":34},"end":{"line":15,"column":60}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"SF6",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":15,"column":61},"end":{"line":15,"column":87}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"C2F6",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":15,"column":88},"end":{"line":15,"column":115}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"C3F8",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":15,"column":116},"end":{"line":15,"column":143}}}),{"name":"any","hash":{},"data":data,"loc":{"start":{"line":15,"column":29},"end":{"line":15,"column":144}}}),{"name":"if","hash":{},"fn":container.program(28, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":15,"column":23},"end":{"line":15,"column":253}}})) != null ? stack1 : "");
 },"28":function(container,depth0,helpers,partials,data) {
-    return "tell every doctor and dentist that there is gas in your eye: you must not be given nitrous oxide (laughing gas) until your eye surgeon has confirmed that the gas has gone";
+    return "do not fly and do not travel up mountains until your eye surgeon has confirmed that the gas has gone";
 },"29":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"wristband") : stack1),{"name":"if","hash":{},"fn":container.program(30, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":16,"column":26},"end":{"line":16,"column":92}}})) != null ? stack1 : "");
-},"30":function(container,depth0,helpers,partials,data) {
-    return "keep the wristband on until then";
-},"31":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -3553,9 +3553,20 @@ export const letters = {
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"any").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"silicone-oil",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":17,"column":31},"end":{"line":17,"column":66}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"heavy-oil",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":17,"column":67},"end":{"line":17,"column":99}}}),{"name":"any","hash":{},"data":data,"loc":{"start":{"line":17,"column":26},"end":{"line":17,"column":100}}}),{"name":"if","hash":{},"fn":container.program(32, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":17,"column":20},"end":{"line":17,"column":191}}})) != null ? stack1 : "");
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"any").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"air",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":16,"column":39},"end":{"line":16,"column":65}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"SF6",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":16,"column":66},"end":{"line":16,"column":92}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"C2F6",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":16,"column":93},"end":{"line":16,"column":120}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"C3F8",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":16,"column":121},"end":{"line":16,"column":148}}}),{"name":"any","hash":{},"data":data,"loc":{"start":{"line":16,"column":34},"end":{"line":16,"column":149}}}),{"name":"if","hash":{},"fn":container.program(30, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":16,"column":28},"end":{"line":16,"column":328}}})) != null ? stack1 : "");
+},"30":function(container,depth0,helpers,partials,data) {
+    return "tell every doctor and dentist that there is gas in your eye: you must not be given nitrous oxide (laughing gas) until your eye surgeon has confirmed that the gas has gone";
+},"31":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"wristband") : stack1),{"name":"if","hash":{},"fn":container.program(32, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":17,"column":26},"end":{"line":17,"column":92}}})) != null ? stack1 : "");
 },"32":function(container,depth0,helpers,partials,data) {
-    return "there is clear oil in your eye; it stays until we take it out in another operation";
+    return "keep the wristband on until then";
 },"33":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -3564,29 +3575,9 @@ export const letters = {
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"posture") : stack1),"none",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":20,"column":6},"end":{"line":20,"column":35}}}),{"name":"if","hash":{},"fn":container.program(34, data, 0),"inverse":container.program(37, data, 0),"data":data,"loc":{"start":{"line":20,"column":0},"end":{"line":20,"column":560}}})) != null ? stack1 : "")
-    + "\n"
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"isList").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"drops") : stack1),{"name":"isList","hash":{},"data":data,"loc":{"start":{"line":21,"column":6},"end":{"line":21,"column":30}}}),{"name":"if","hash":{},"fn":container.program(44, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":0},"end":{"line":21,"column":248}}})) != null ? stack1 : "")
-    + "\n"
-    + ((stack1 = lookupProperty(helpers,"each").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"tablets") : stack1),{"name":"each","hash":{},"fn":container.program(50, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":22,"column":0},"end":{"line":22,"column":216}}})) != null ? stack1 : "")
-    + "\n"
-    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"shield",{"name":"statement","hash":{},"fn":container.program(53, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":23,"column":0},"end":{"line":23,"column":181}}})) != null ? stack1 : "")
-    + "\n"
-    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"activity",{"name":"statement","hash":{},"fn":container.program(55, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":24,"column":0},"end":{"line":24,"column":94}}})) != null ? stack1 : "")
-    + "\n"
-    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"driving",{"name":"statement","hash":{},"fn":container.program(57, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":25,"column":0},"end":{"line":25,"column":236}}})) != null ? stack1 : "")
-    + "\n"
-    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"glasses",{"name":"statement","hash":{},"fn":container.program(60, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":26,"column":0},"end":{"line":26,"column":147}}})) != null ? stack1 : "")
-    + "\n";
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"any").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"silicone-oil",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":18,"column":31},"end":{"line":18,"column":66}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"heavy-oil",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":18,"column":67},"end":{"line":18,"column":99}}}),{"name":"any","hash":{},"data":data,"loc":{"start":{"line":18,"column":26},"end":{"line":18,"column":100}}}),{"name":"if","hash":{},"fn":container.program(34, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":18,"column":20},"end":{"line":18,"column":191}}})) != null ? stack1 : "");
 },"34":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return ((stack1 = lookupProperty(helpers,"statement").call(depth0 != null ? depth0 : (container.nullContext || {}),"no-posture",{"name":"statement","hash":{},"fn":container.program(35, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":20,"column":37},"end":{"line":20,"column":156}}})) != null ? stack1 : "");
+    return "there is clear oil in your eye; it stays until we take it out in another operation";
 },"35":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -3595,27 +3586,40 @@ export const letters = {
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"posture") : stack1),"none",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":20,"column":70},"end":{"line":20,"column":99}}}),{"name":"if","hash":{},"fn":container.program(36, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":20,"column":64},"end":{"line":20,"column":142}}})) != null ? stack1 : "");
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"posture") : stack1),"none",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":21,"column":6},"end":{"line":21,"column":35}}}),{"name":"if","hash":{},"fn":container.program(36, data, 0),"inverse":container.program(39, data, 0),"data":data,"loc":{"start":{"line":21,"column":0},"end":{"line":21,"column":560}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"isList").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"drops") : stack1),{"name":"isList","hash":{},"data":data,"loc":{"start":{"line":22,"column":6},"end":{"line":22,"column":30}}}),{"name":"if","hash":{},"fn":container.program(46, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":22,"column":0},"end":{"line":22,"column":248}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"each").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"tablets") : stack1),{"name":"each","hash":{},"fn":container.program(52, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":23,"column":0},"end":{"line":23,"column":216}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"shield",{"name":"statement","hash":{},"fn":container.program(55, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":24,"column":0},"end":{"line":24,"column":181}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"activity",{"name":"statement","hash":{},"fn":container.program(57, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":25,"column":0},"end":{"line":25,"column":94}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"driving",{"name":"statement","hash":{},"fn":container.program(59, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":26,"column":0},"end":{"line":26,"column":236}}})) != null ? stack1 : "")
+    + "\n"
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"glasses",{"name":"statement","hash":{},"fn":container.program(62, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":27,"column":0},"end":{"line":27,"column":147}}})) != null ? stack1 : "")
+    + "\n";
 },"36":function(container,depth0,helpers,partials,data) {
-    return "you may hold your head as you like";
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"statement").call(depth0 != null ? depth0 : (container.nullContext || {}),"no-posture",{"name":"statement","hash":{},"fn":container.program(37, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":37},"end":{"line":21,"column":156}}})) != null ? stack1 : "");
 },"37":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
         }
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"posture") : stack1),{"name":"each","hash":{},"fn":container.program(38, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":20,"column":164},"end":{"line":20,"column":553}}})) != null ? stack1 : "");
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"posture") : stack1),"none",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":21,"column":70},"end":{"line":21,"column":99}}}),{"name":"if","hash":{},"fn":container.program(38, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":64},"end":{"line":21,"column":142}}})) != null ? stack1 : "");
 },"38":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return ((stack1 = lookupProperty(helpers,"statement").call(depth0 != null ? depth0 : (container.nullContext || {}),"posture",(data && lookupProperty(data,"index")),{"name":"statement","hash":{},"fn":container.program(39, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":20,"column":191},"end":{"line":20,"column":544}}})) != null ? stack1 : "");
+    return "you may hold your head as you like";
 },"39":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -3624,20 +3628,16 @@ export const letters = {
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"position") : depth0),{"name":"if","hash":{},"fn":container.program(40, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":20,"column":222},"end":{"line":20,"column":530}}})) != null ? stack1 : "");
+  return ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"posture") : stack1),{"name":"each","hash":{},"fn":container.program(40, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":164},"end":{"line":21,"column":553}}})) != null ? stack1 : "");
 },"40":function(container,depth0,helpers,partials,data) {
-    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
         }
         return undefined
     };
 
-  return "keep your head like this: "
-    + ((stack1 = lookupProperty(helpers,"label").call(alias1,"aftercare.posture.position",(depth0 != null ? lookupProperty(depth0,"position") : depth0),{"name":"label","hash":{},"data":data,"loc":{"start":{"line":20,"column":264},"end":{"line":20,"column":311}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,(depth0 != null ? lookupProperty(depth0,"hoursADay") : depth0),{"name":"if","hash":{},"fn":container.program(41, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":20,"column":311},"end":{"line":20,"column":384}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,(depth0 != null ? lookupProperty(depth0,"minutesAnHour") : depth0),{"name":"if","hash":{},"fn":container.program(42, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":20,"column":384},"end":{"line":20,"column":456}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"moreThan").call(alias1,(depth0 != null ? lookupProperty(depth0,"days") : depth0),0,{"name":"moreThan","hash":{},"data":data,"loc":{"start":{"line":20,"column":462},"end":{"line":20,"column":479}}}),{"name":"if","hash":{},"fn":container.program(43, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":20,"column":456},"end":{"line":20,"column":523}}})) != null ? stack1 : "");
+  return ((stack1 = lookupProperty(helpers,"statement").call(depth0 != null ? depth0 : (container.nullContext || {}),"posture",(data && lookupProperty(data,"index")),{"name":"statement","hash":{},"fn":container.program(41, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":191},"end":{"line":21,"column":544}}})) != null ? stack1 : "");
 },"41":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -3646,10 +3646,32 @@ export const letters = {
         return undefined
     };
 
-  return ", for "
-    + ((stack1 = lookupProperty(helpers,"figureOf").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"hoursADay") : depth0),"hour","hours",{"name":"figureOf","hash":{},"data":data,"loc":{"start":{"line":20,"column":334},"end":{"line":20,"column":371}}})) != null ? stack1 : "")
-    + " a day";
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"position") : depth0),{"name":"if","hash":{},"fn":container.program(42, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":222},"end":{"line":21,"column":530}}})) != null ? stack1 : "");
 },"42":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "keep your head like this: "
+    + ((stack1 = lookupProperty(helpers,"label").call(alias1,"aftercare.posture.position",(depth0 != null ? lookupProperty(depth0,"position") : depth0),{"name":"label","hash":{},"data":data,"loc":{"start":{"line":21,"column":264},"end":{"line":21,"column":311}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,(depth0 != null ? lookupProperty(depth0,"hoursADay") : depth0),{"name":"if","hash":{},"fn":container.program(43, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":311},"end":{"line":21,"column":384}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,(depth0 != null ? lookupProperty(depth0,"minutesAnHour") : depth0),{"name":"if","hash":{},"fn":container.program(44, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":384},"end":{"line":21,"column":456}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"moreThan").call(alias1,(depth0 != null ? lookupProperty(depth0,"days") : depth0),0,{"name":"moreThan","hash":{},"data":data,"loc":{"start":{"line":21,"column":462},"end":{"line":21,"column":479}}}),{"name":"if","hash":{},"fn":container.program(45, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":456},"end":{"line":21,"column":523}}})) != null ? stack1 : "");
+},"43":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ", for "
+    + ((stack1 = lookupProperty(helpers,"figureOf").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"hoursADay") : depth0),"hour","hours",{"name":"figureOf","hash":{},"data":data,"loc":{"start":{"line":21,"column":334},"end":{"line":21,"column":371}}})) != null ? stack1 : "")
+    + " a day";
+},"44":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -3660,25 +3682,6 @@ export const letters = {
   return ", for "
     + ((stack1 = container.lambda((depth0 != null ? lookupProperty(depth0,"minutesAnHour") : depth0), depth0)) != null ? stack1 : "")
     + " minutes of each hour";
-},"43":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return ", for "
-    + ((stack1 = lookupProperty(helpers,"countOf").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"days") : depth0),"day","days",{"name":"countOf","hash":{},"data":data,"loc":{"start":{"line":20,"column":487},"end":{"line":20,"column":516}}})) != null ? stack1 : "");
-},"44":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"drops") : stack1),{"name":"each","hash":{},"fn":container.program(45, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":32},"end":{"line":21,"column":241}}})) != null ? stack1 : "");
 },"45":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -3687,7 +3690,8 @@ export const letters = {
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"statement").call(depth0 != null ? depth0 : (container.nullContext || {}),"drop",(data && lookupProperty(data,"index")),{"name":"statement","hash":{},"fn":container.program(46, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":57},"end":{"line":21,"column":232}}})) != null ? stack1 : "");
+  return ", for "
+    + ((stack1 = lookupProperty(helpers,"countOf").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"days") : depth0),"day","days",{"name":"countOf","hash":{},"data":data,"loc":{"start":{"line":21,"column":487},"end":{"line":21,"column":516}}})) != null ? stack1 : "");
 },"46":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -3696,8 +3700,26 @@ export const letters = {
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"drug") : depth0),{"name":"if","hash":{},"fn":container.program(47, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":85},"end":{"line":21,"column":218}}})) != null ? stack1 : "");
+  return ((stack1 = lookupProperty(helpers,"each").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"drops") : stack1),{"name":"each","hash":{},"fn":container.program(47, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":22,"column":32},"end":{"line":22,"column":241}}})) != null ? stack1 : "");
 },"47":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"statement").call(depth0 != null ? depth0 : (container.nullContext || {}),"drop",(data && lookupProperty(data,"index")),{"name":"statement","hash":{},"fn":container.program(48, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":22,"column":57},"end":{"line":22,"column":232}}})) != null ? stack1 : "");
+},"48":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"drug") : depth0),{"name":"if","hash":{},"fn":container.program(49, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":22,"column":85},"end":{"line":22,"column":218}}})) != null ? stack1 : "");
+},"49":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -3707,11 +3729,11 @@ export const letters = {
 
   return "use the "
     + ((stack1 = container.lambda((depth0 != null ? lookupProperty(depth0,"drug") : depth0), depth0)) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,(depth0 != null ? lookupProperty(depth0,"strength") : depth0),{"name":"if","hash":{},"fn":container.program(48, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":113},"end":{"line":21,"column":149}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,(depth0 != null ? lookupProperty(depth0,"strength") : depth0),{"name":"if","hash":{},"fn":container.program(50, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":22,"column":113},"end":{"line":22,"column":149}}})) != null ? stack1 : "")
     + " drops "
-    + ((stack1 = lookupProperty(helpers,"course").call(alias1,(depth0 != null ? lookupProperty(depth0,"timesADay") : depth0),(depth0 != null ? lookupProperty(depth0,"weeks") : depth0),{"name":"course","hash":{},"data":data,"loc":{"start":{"line":21,"column":156},"end":{"line":21,"column":182}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,(depth0 != null ? lookupProperty(depth0,"note") : depth0),{"name":"if","hash":{},"fn":container.program(49, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":21,"column":182},"end":{"line":21,"column":211}}})) != null ? stack1 : "");
-},"48":function(container,depth0,helpers,partials,data) {
+    + ((stack1 = lookupProperty(helpers,"course").call(alias1,(depth0 != null ? lookupProperty(depth0,"timesADay") : depth0),(depth0 != null ? lookupProperty(depth0,"weeks") : depth0),{"name":"course","hash":{},"data":data,"loc":{"start":{"line":22,"column":156},"end":{"line":22,"column":182}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,(depth0 != null ? lookupProperty(depth0,"note") : depth0),{"name":"if","hash":{},"fn":container.program(51, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":22,"column":182},"end":{"line":22,"column":211}}})) != null ? stack1 : "");
+},"50":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -3721,7 +3743,7 @@ export const letters = {
 
   return " "
     + ((stack1 = container.lambda((depth0 != null ? lookupProperty(depth0,"strength") : depth0), depth0)) != null ? stack1 : "");
-},"49":function(container,depth0,helpers,partials,data) {
+},"51":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -3731,25 +3753,25 @@ export const letters = {
 
   return ", "
     + ((stack1 = container.lambda((depth0 != null ? lookupProperty(depth0,"note") : depth0), depth0)) != null ? stack1 : "");
-},"50":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return ((stack1 = lookupProperty(helpers,"statement").call(depth0 != null ? depth0 : (container.nullContext || {}),"tablet",(data && lookupProperty(data,"index")),{"name":"statement","hash":{},"fn":container.program(51, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":22,"column":27},"end":{"line":22,"column":207}}})) != null ? stack1 : "");
-},"51":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"drug") : depth0),{"name":"if","hash":{},"fn":container.program(52, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":22,"column":57},"end":{"line":22,"column":193}}})) != null ? stack1 : "");
 },"52":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"statement").call(depth0 != null ? depth0 : (container.nullContext || {}),"tablet",(data && lookupProperty(data,"index")),{"name":"statement","hash":{},"fn":container.program(53, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":23,"column":27},"end":{"line":23,"column":207}}})) != null ? stack1 : "");
+},"53":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"drug") : depth0),{"name":"if","hash":{},"fn":container.program(54, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":23,"column":57},"end":{"line":23,"column":193}}})) != null ? stack1 : "");
+},"54":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -3759,11 +3781,11 @@ export const letters = {
 
   return "take the "
     + ((stack1 = container.lambda((depth0 != null ? lookupProperty(depth0,"drug") : depth0), depth0)) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,(depth0 != null ? lookupProperty(depth0,"strength") : depth0),{"name":"if","hash":{},"fn":container.program(48, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":22,"column":86},"end":{"line":22,"column":122}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,(depth0 != null ? lookupProperty(depth0,"strength") : depth0),{"name":"if","hash":{},"fn":container.program(50, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":23,"column":86},"end":{"line":23,"column":122}}})) != null ? stack1 : "")
     + " tablets "
-    + ((stack1 = lookupProperty(helpers,"course").call(alias1,(depth0 != null ? lookupProperty(depth0,"timesADay") : depth0),(depth0 != null ? lookupProperty(depth0,"weeks") : depth0),{"name":"course","hash":{},"data":data,"loc":{"start":{"line":22,"column":131},"end":{"line":22,"column":157}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,(depth0 != null ? lookupProperty(depth0,"note") : depth0),{"name":"if","hash":{},"fn":container.program(49, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":22,"column":157},"end":{"line":22,"column":186}}})) != null ? stack1 : "");
-},"53":function(container,depth0,helpers,partials,data) {
+    + ((stack1 = lookupProperty(helpers,"course").call(alias1,(depth0 != null ? lookupProperty(depth0,"timesADay") : depth0),(depth0 != null ? lookupProperty(depth0,"weeks") : depth0),{"name":"course","hash":{},"data":data,"loc":{"start":{"line":23,"column":131},"end":{"line":23,"column":157}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,(depth0 != null ? lookupProperty(depth0,"note") : depth0),{"name":"if","hash":{},"fn":container.program(51, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":23,"column":157},"end":{"line":23,"column":186}}})) != null ? stack1 : "");
+},"55":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -3771,26 +3793,7 @@ export const letters = {
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"moreThan").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"shieldNights") : stack1),0,{"name":"moreThan","hash":{},"data":data,"loc":{"start":{"line":23,"column":29},"end":{"line":23,"column":64}}}),{"name":"if","hash":{},"fn":container.program(54, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":23,"column":23},"end":{"line":23,"column":167}}})) != null ? stack1 : "");
-},"54":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return "wear the shield over your eye at night for "
-    + ((stack1 = lookupProperty(helpers,"countOf").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"shieldNights") : stack1),"night","nights",{"name":"countOf","hash":{},"data":data,"loc":{"start":{"line":23,"column":109},"end":{"line":23,"column":160}}})) != null ? stack1 : "");
-},"55":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"activity") : stack1),{"name":"if","hash":{},"fn":container.program(56, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":24,"column":25},"end":{"line":24,"column":80}}})) != null ? stack1 : "");
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"moreThan").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"shieldNights") : stack1),0,{"name":"moreThan","hash":{},"data":data,"loc":{"start":{"line":24,"column":29},"end":{"line":24,"column":64}}}),{"name":"if","hash":{},"fn":container.program(56, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":24,"column":23},"end":{"line":24,"column":167}}})) != null ? stack1 : "");
 },"56":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -3799,22 +3802,9 @@ export const letters = {
         return undefined
     };
 
-  return ((stack1 = container.lambda(((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"activity") : stack1), depth0)) != null ? stack1 : "");
+  return "wear the shield over your eye at night for "
+    + ((stack1 = lookupProperty(helpers,"countOf").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"shieldNights") : stack1),"night","nights",{"name":"countOf","hash":{},"data":data,"loc":{"start":{"line":24,"column":109},"end":{"line":24,"column":160}}})) != null ? stack1 : "");
 },"57":function(container,depth0,helpers,partials,data) {
-    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"driving") : stack1),"not-until-review",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":25,"column":30},"end":{"line":25,"column":71}}}),{"name":"if","hash":{},"fn":container.program(58, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":25,"column":24},"end":{"line":25,"column":115}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"driving") : stack1),"as-rules",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":25,"column":121},"end":{"line":25,"column":154}}}),{"name":"if","hash":{},"fn":container.program(59, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":25,"column":115},"end":{"line":25,"column":222}}})) != null ? stack1 : "");
-},"58":function(container,depth0,helpers,partials,data) {
-    return "do not drive until we have seen you";
-},"59":function(container,depth0,helpers,partials,data) {
-    return "drive only when you meet the rules for sight where you live";
-},"60":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -3822,9 +3812,30 @@ export const letters = {
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"refractiveChangeTold") : stack1),{"name":"if","hash":{},"fn":container.program(61, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":26,"column":24},"end":{"line":26,"column":133}}})) != null ? stack1 : "");
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"activity") : stack1),{"name":"if","hash":{},"fn":container.program(58, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":25,"column":25},"end":{"line":25,"column":80}}})) != null ? stack1 : "");
+},"58":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = container.lambda(((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"activity") : stack1), depth0)) != null ? stack1 : "");
+},"59":function(container,depth0,helpers,partials,data) {
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"driving") : stack1),"not-until-review",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":26,"column":30},"end":{"line":26,"column":71}}}),{"name":"if","hash":{},"fn":container.program(60, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":26,"column":24},"end":{"line":26,"column":115}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"driving") : stack1),"as-rules",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":26,"column":121},"end":{"line":26,"column":154}}}),{"name":"if","hash":{},"fn":container.program(61, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":26,"column":115},"end":{"line":26,"column":222}}})) != null ? stack1 : "");
+},"60":function(container,depth0,helpers,partials,data) {
+    return "do not drive until we have seen you";
 },"61":function(container,depth0,helpers,partials,data) {
-    return "you may need other glasses later; wait until the eye has settled";
+    return "drive only when you meet the rules for sight where you live";
 },"62":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -3833,17 +3844,9 @@ export const letters = {
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"statement").call(depth0 != null ? depth0 : (container.nullContext || {}),"call",{"name":"statement","hash":{},"fn":container.program(63, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":29,"column":0},"end":{"line":29,"column":166}}})) != null ? stack1 : "")
-    + "\n";
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"refractiveChangeTold") : stack1),{"name":"if","hash":{},"fn":container.program(63, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":27,"column":24},"end":{"line":27,"column":133}}})) != null ? stack1 : "");
 },"63":function(container,depth0,helpers,partials,data) {
-    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
-        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
-          return parent[propertyName];
-        }
-        return undefined
-    };
-
-  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"warningSigns") : stack1),{"name":"if","hash":{},"fn":container.program(64, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":29,"column":21},"end":{"line":29,"column":152}}})) != null ? stack1 : "");
+    return "you may need other glasses later; wait until the eye has settled";
 },"64":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -3852,8 +3855,8 @@ export const letters = {
         return undefined
     };
 
-  return "call us at once, day or night, with "
-    + ((stack1 = lookupProperty(helpers,"either").call(depth0 != null ? depth0 : (container.nullContext || {}),"aftercare.warningSigns",((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"warningSigns") : stack1),{"name":"either","hash":{},"data":data,"loc":{"start":{"line":29,"column":87},"end":{"line":29,"column":145}}})) != null ? stack1 : "");
+  return ((stack1 = lookupProperty(helpers,"statement").call(depth0 != null ? depth0 : (container.nullContext || {}),"call",{"name":"statement","hash":{},"fn":container.program(65, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":30,"column":0},"end":{"line":30,"column":166}}})) != null ? stack1 : "")
+    + "\n";
 },"65":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -3862,8 +3865,7 @@ export const letters = {
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"statement").call(depth0 != null ? depth0 : (container.nullContext || {}),"review",{"name":"statement","hash":{},"fn":container.program(66, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":32,"column":0},"end":{"line":32,"column":394}}})) != null ? stack1 : "")
-    + "\n";
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"warningSigns") : stack1),{"name":"if","hash":{},"fn":container.program(66, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":30,"column":21},"end":{"line":30,"column":152}}})) != null ? stack1 : "");
 },"66":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -3872,8 +3874,28 @@ export const letters = {
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewAt") : stack1),{"name":"if","hash":{},"fn":container.program(67, data, 0),"inverse":container.program(69, data, 0),"data":data,"loc":{"start":{"line":32,"column":23},"end":{"line":32,"column":380}}})) != null ? stack1 : "");
+  return "call us at once, day or night, with "
+    + ((stack1 = lookupProperty(helpers,"either").call(depth0 != null ? depth0 : (container.nullContext || {}),"aftercare.warningSigns",((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"warningSigns") : stack1),{"name":"either","hash":{},"data":data,"loc":{"start":{"line":30,"column":87},"end":{"line":30,"column":145}}})) != null ? stack1 : "");
 },"67":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"statement").call(depth0 != null ? depth0 : (container.nullContext || {}),"review",{"name":"statement","hash":{},"fn":container.program(68, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":33,"column":0},"end":{"line":33,"column":394}}})) != null ? stack1 : "")
+    + "\n";
+},"68":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewAt") : stack1),{"name":"if","hash":{},"fn":container.program(69, data, 0),"inverse":container.program(71, data, 0),"data":data,"loc":{"start":{"line":33,"column":23},"end":{"line":33,"column":380}}})) != null ? stack1 : "");
+},"69":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -3882,11 +3904,11 @@ export const letters = {
     };
 
   return "we see you again on "
-    + ((stack1 = lookupProperty(helpers,"date").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewAt") : stack1),{"name":"date","hash":{},"data":data,"loc":{"start":{"line":32,"column":69},"end":{"line":32,"column":96}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"date").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewAt") : stack1),{"name":"date","hash":{},"data":data,"loc":{"start":{"line":33,"column":69},"end":{"line":33,"column":96}}})) != null ? stack1 : "")
     + " at "
-    + ((stack1 = lookupProperty(helpers,"time").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewAt") : stack1),{"name":"time","hash":{},"data":data,"loc":{"start":{"line":32,"column":100},"end":{"line":32,"column":127}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewPlace") : stack1),{"name":"if","hash":{},"fn":container.program(68, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":32,"column":127},"end":{"line":32,"column":190}}})) != null ? stack1 : "");
-},"68":function(container,depth0,helpers,partials,data) {
+    + ((stack1 = lookupProperty(helpers,"time").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewAt") : stack1),{"name":"time","hash":{},"data":data,"loc":{"start":{"line":33,"column":100},"end":{"line":33,"column":127}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewPlace") : stack1),{"name":"if","hash":{},"fn":container.program(70, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":33,"column":127},"end":{"line":33,"column":190}}})) != null ? stack1 : "");
+},"70":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -3896,7 +3918,7 @@ export const letters = {
 
   return ", "
     + ((stack1 = container.lambda(((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewPlace") : stack1), depth0)) != null ? stack1 : "");
-},"69":function(container,depth0,helpers,partials,data) {
+},"71":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -3904,8 +3926,8 @@ export const letters = {
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"known").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewInDays") : stack1),{"name":"known","hash":{},"data":data,"loc":{"start":{"line":32,"column":204},"end":{"line":32,"column":234}}}),{"name":"if","hash":{},"fn":container.program(70, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":32,"column":198},"end":{"line":32,"column":373}}})) != null ? stack1 : "");
-},"70":function(container,depth0,helpers,partials,data) {
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"known").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewInDays") : stack1),{"name":"known","hash":{},"data":data,"loc":{"start":{"line":33,"column":204},"end":{"line":33,"column":234}}}),{"name":"if","hash":{},"fn":container.program(72, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":33,"column":198},"end":{"line":33,"column":373}}})) != null ? stack1 : "");
+},"72":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -3914,8 +3936,8 @@ export const letters = {
     };
 
   return "we see you again in "
-    + ((stack1 = lookupProperty(helpers,"countOf").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewInDays") : stack1),"day","days",{"name":"countOf","hash":{},"data":data,"loc":{"start":{"line":32,"column":256},"end":{"line":32,"column":303}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewPlace") : stack1),{"name":"if","hash":{},"fn":container.program(68, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":32,"column":303},"end":{"line":32,"column":366}}})) != null ? stack1 : "");
+    + ((stack1 = lookupProperty(helpers,"countOf").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewInDays") : stack1),"day","days",{"name":"countOf","hash":{},"data":data,"loc":{"start":{"line":33,"column":256},"end":{"line":33,"column":303}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"reviewPlace") : stack1),{"name":"if","hash":{},"fn":container.program(70, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":33,"column":303},"end":{"line":33,"column":366}}})) != null ? stack1 : "");
 },"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -3926,10 +3948,10 @@ export const letters = {
 
   return ((stack1 = lookupProperty(helpers,"section").call(alias1,"salutation","Salutation",{"name":"section","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":1,"column":0},"end":{"line":4,"column":12}}})) != null ? stack1 : "")
     + ((stack1 = lookupProperty(helpers,"section").call(alias1,"what","What was wrong and what we did",{"name":"section","hash":{},"fn":container.program(6, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":5,"column":0},"end":{"line":11,"column":12}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"gas","Gas or oil in your eye",{"name":"section","hash":{},"fn":container.program(20, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":12,"column":0},"end":{"line":18,"column":12}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"do","What to do",{"name":"section","hash":{},"fn":container.program(33, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":19,"column":0},"end":{"line":27,"column":12}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"call","When to call us at once",{"name":"section","hash":{},"fn":container.program(62, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":28,"column":0},"end":{"line":30,"column":12}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"next","Next visit",{"name":"section","hash":{},"fn":container.program(65, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":31,"column":0},"end":{"line":33,"column":12}}})) != null ? stack1 : "");
+    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"gas","Gas or oil in your eye",{"name":"section","hash":{},"fn":container.program(20, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":12,"column":0},"end":{"line":19,"column":12}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"do","What to do",{"name":"section","hash":{},"fn":container.program(35, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":20,"column":0},"end":{"line":28,"column":12}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"call","When to call us at once",{"name":"section","hash":{},"fn":container.program(64, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":29,"column":0},"end":{"line":31,"column":12}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"next","Next visit",{"name":"section","hash":{},"fn":container.program(67, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":32,"column":0},"end":{"line":34,"column":12}}})) != null ? stack1 : "");
 },"useData":true},
   "referring-doctor": {"0":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -4044,13 +4066,13 @@ export const letters = {
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"statement").call(alias1,"pressure",{"name":"statement","hash":{},"fn":container.program(12, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":12,"column":0},"end":{"line":12,"column":261}}})) != null ? stack1 : "")
+  return ((stack1 = lookupProperty(helpers,"statement").call(alias1,"pressure",{"name":"statement","hash":{},"fn":container.program(12, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":12,"column":0},"end":{"line":12,"column":337}}})) != null ? stack1 : "")
     + "\n"
     + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"oil-pressure",{"name":"statement","hash":{},"fn":container.program(14, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":13,"column":0},"end":{"line":13,"column":268}}})) != null ? stack1 : "")
     + "\n"
     + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"again",{"name":"statement","hash":{},"fn":container.program(16, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":14,"column":0},"end":{"line":14,"column":173}}})) != null ? stack1 : "")
     + "\n"
-    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"glasses",{"name":"statement","hash":{},"fn":container.program(18, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":15,"column":0},"end":{"line":15,"column":189}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"statement").call(alias1,"glasses",{"name":"statement","hash":{},"fn":container.program(18, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":15,"column":0},"end":{"line":15,"column":317}}})) != null ? stack1 : "")
     + "\n";
 },"12":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
@@ -4060,9 +4082,18 @@ export const letters = {
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"any").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"SF6",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":12,"column":36},"end":{"line":12,"column":62}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"C2F6",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":12,"column":63},"end":{"line":12,"column":90}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"C3F8",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":12,"column":91},"end":{"line":12,"column":118}}}),{"name":"any","hash":{},"data":data,"loc":{"start":{"line":12,"column":31},"end":{"line":12,"column":119}}}),{"name":"if","hash":{},"fn":container.program(13, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":12,"column":25},"end":{"line":12,"column":247}}})) != null ? stack1 : "");
+  return ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"any").call(alias1,lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"SF6",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":12,"column":36},"end":{"line":12,"column":62}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"C2F6",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":12,"column":63},"end":{"line":12,"column":90}}}),lookupProperty(helpers,"is").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"tamponade") : depth0)) != null ? lookupProperty(stack1,"agent") : stack1),"C3F8",{"name":"is","hash":{},"data":data,"loc":{"start":{"line":12,"column":91},"end":{"line":12,"column":118}}}),{"name":"any","hash":{},"data":data,"loc":{"start":{"line":12,"column":31},"end":{"line":12,"column":119}}}),{"name":"if","hash":{},"fn":container.program(13, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":12,"column":25},"end":{"line":12,"column":323}}})) != null ? stack1 : "");
 },"13":function(container,depth0,helpers,partials,data) {
-    return "if you see the patient while there is gas in the eye, please measure the pressure; tell us the same day if it is raised";
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "if you see the patient while there is gas in the eye, please measure the pressure; tell us the same day if it is raised; the gas may last "
+    + ((stack1 = lookupProperty(helpers,"gasSpan").call(depth0 != null ? depth0 : (container.nullContext || {}),(depth0 != null ? lookupProperty(depth0,"tamponade") : depth0),((stack1 = (depth0 != null ? lookupProperty(depth0,"before") : depth0)) != null ? lookupProperty(stack1,"lens") : stack1),{"name":"gasSpan","hash":{},"data":data,"loc":{"start":{"line":12,"column":259},"end":{"line":12,"column":292}}})) != null ? stack1 : "")
+    + " or longer (an estimate)";
 },"14":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
@@ -4093,10 +4124,29 @@ export const letters = {
         return undefined
     };
 
-  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"refractiveChangeTold") : stack1),{"name":"if","hash":{},"fn":container.program(19, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":15,"column":24},"end":{"line":15,"column":175}}})) != null ? stack1 : "");
+  return ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"aftercare") : depth0)) != null ? lookupProperty(stack1,"refractiveChangeTold") : stack1),{"name":"if","hash":{},"fn":container.program(19, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":15,"column":24},"end":{"line":15,"column":303}}})) != null ? stack1 : "");
 },"19":function(container,depth0,helpers,partials,data) {
-    return "please wait with new glasses until the eye has settled: the operation is expected to change its refraction";
+    var stack1, alias1=depth0 != null ? depth0 : (container.nullContext || {}), lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "please wait with new glasses until the eye has settled: the operation is expected to change its refraction"
+    + ((stack1 = lookupProperty(helpers,"if").call(alias1,lookupProperty(helpers,"bandShift").call(alias1,((stack1 = (depth0 != null ? lookupProperty(depth0,"buckle") : depth0)) != null ? lookupProperty(stack1,"elements") : stack1),{"name":"bandShift","hash":{},"data":data,"loc":{"start":{"line":15,"column":174},"end":{"line":15,"column":201}}}),{"name":"if","hash":{},"fn":container.program(20, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":15,"column":168},"end":{"line":15,"column":296}}})) != null ? stack1 : "");
 },"20":function(container,depth0,helpers,partials,data) {
+    var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
+        if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
+          return parent[propertyName];
+        }
+        return undefined
+    };
+
+  return "; published bands made the eye "
+    + ((stack1 = lookupProperty(helpers,"bandShift").call(depth0 != null ? depth0 : (container.nullContext || {}),((stack1 = (depth0 != null ? lookupProperty(depth0,"buckle") : depth0)) != null ? lookupProperty(stack1,"elements") : stack1),{"name":"bandShift","hash":{},"data":data,"loc":{"start":{"line":15,"column":234},"end":{"line":15,"column":263}}})) != null ? stack1 : "")
+    + " more myopic (an estimate)";
+},"21":function(container,depth0,helpers,partials,data) {
     var stack1, lookupProperty = container.lookupProperty || function(parent, propertyName) {
         if (Object.prototype.hasOwnProperty.call(parent, propertyName)) {
           return parent[propertyName];
@@ -4120,7 +4170,7 @@ export const letters = {
     + ((stack1 = lookupProperty(helpers,"section").call(alias1,"diagnosis","Diagnosis",{"name":"section","hash":{},"fn":container.program(9, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":5,"column":0},"end":{"line":7,"column":12}}})) != null ? stack1 : "")
     + ((stack1 = lookupProperty(helpers,"section").call(alias1,"procedure","Procedure",{"name":"section","hash":{},"fn":container.program(10, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":8,"column":0},"end":{"line":10,"column":12}}})) != null ? stack1 : "")
     + ((stack1 = lookupProperty(helpers,"section").call(alias1,"actions","What we ask of you",{"name":"section","hash":{},"fn":container.program(11, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":11,"column":0},"end":{"line":16,"column":12}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"aftercare","What the patient was told",{"name":"section","hash":{},"fn":container.program(20, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":17,"column":0},"end":{"line":22,"column":12}}})) != null ? stack1 : "");
+    + ((stack1 = lookupProperty(helpers,"section").call(alias1,"aftercare","What the patient was told",{"name":"section","hash":{},"fn":container.program(21, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":17,"column":0},"end":{"line":22,"column":12}}})) != null ? stack1 : "");
 },"usePartial":true,"useData":true},
 };
 export const partials = {
