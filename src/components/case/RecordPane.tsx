@@ -4,8 +4,8 @@ import { stages } from '../../domain/record/schema.ts';
 import { Key } from '../ui/Key.tsx';
 import { Group } from './Group.tsx';
 import { goToStage } from './go-to-field.ts';
+import { Pictures } from './Pictures.tsx';
 import { StageList } from './StageList.tsx';
-import { UnrolledGlobe } from './UnrolledGlobe.tsx';
 import { useDesk, useDeskTools } from './use-desk.ts';
 
 const boxes = 'input, select';
@@ -45,7 +45,7 @@ export const RecordPane = () => {
     <div className="record">
       <StageList />
       <div className="record-stage">
-        <UnrolledGlobe />
+        <Pictures />
         <h2 id="stage-title" tabIndex={-1}>
           {stageTitle(stage)}
         </h2>

@@ -1,8 +1,7 @@
-import { useCallback, useMemo, useState } from 'react';
+import { useCallback, useState } from 'react';
 import { valueAt } from '../../domain/record/paths.ts';
 import { showClock } from '../ui/entry.ts';
 import { GlobeHandle } from './GlobeHandle.tsx';
-import { globeFrom } from './globe-from-record.ts';
 import {
   areaBetween,
   type GlobeBreak as Break,
@@ -20,7 +19,8 @@ import {
   yOf,
 } from './globe-model.ts';
 import { goToField } from './go-to-field.ts';
-import { useDesk, useDeskTools } from './use-desk.ts';
+import { useDeskTools } from './use-desk.ts';
+import { useGlobeModel } from './use-globe-model.ts';
 
 const hours = Array.from({ length: 13 }, (_, index) => ({
   hour: ((index + 5) % 12) + 1,
@@ -144,23 +144,8 @@ const placeInWords = (found: Break, clock: number, frontMm: number) =>
 /** The eye wall laid flat: clock hours across from 6 to 6, millimetres behind the limbus down. */
 export const UnrolledGlobe = () => {
   const { store, readOnly } = useDeskTools();
-  const who = useDesk((state) => state.record.who?.eye);
-  const before = useDesk((state) => state.record.before);
-  const breaks = useDesk((state) => state.record.breaks);
-  const buckle = useDesk((state) => state.record.buckle);
   const [said, setSaid] = useState('');
-  // The parts of the record that the picture is made from, so that other fields do not redraw it.
-  const model = useMemo(
-    () =>
-      globeFrom({
-        version: 1,
-        ...(who && { who: { eye: who } }),
-        ...(before && { before }),
-        ...(breaks && { breaks }),
-        ...(buckle && { buckle }),
-      }),
-    [who, before, breaks, buckle],
-  );
+  const model = useGlobeModel();
 
   const move = useCallback(
     (found: Break, clockHours: number, mm: number) => {

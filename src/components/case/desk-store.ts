@@ -49,6 +49,8 @@ export interface DeskState {
   /** Id of the flag that was gone to last. */
   readonly flag: string | null;
   readonly pane: Pane;
+  /** Which picture stands over the record: the wall laid flat, or the inside. */
+  readonly picture: 'wall' | 'inside';
   /** Grows with every change that has to be saved. */
   readonly edits: number;
   readonly past: readonly CaseRecord[];
@@ -129,6 +131,7 @@ export const createDeskStore = (start: Content & { stage: Stage }, derive: Deriv
     lit: noPaths,
     flag: null,
     pane: 'record',
+    picture: 'wall',
     edits: 0,
     past: [],
     future: [],
@@ -240,6 +243,7 @@ export const createDeskStore = (start: Content & { stage: Stage }, derive: Deriv
     expand: (groupPath: FieldPath, shown: boolean) =>
       set({ expanded: { ...state.expanded, [groupPath]: shown } }),
     show: (pane: Pane) => set({ pane }),
+    turnPicture: () => set({ picture: state.picture === 'wall' ? 'inside' : 'wall' }),
     focusOn: (field: FieldPath | null) => {
       if (field !== state.field) set({ field });
     },

@@ -1,5 +1,5 @@
 import { arcHours, type ClockArc, quadrantMiddle, wrapClock } from '../../domain/anatomy/clock.ts';
-import { equatorMm, type Globe, globeOf } from '../../domain/anatomy/globe.ts';
+import { equatorMm, type Globe, globeOf, poleMm } from '../../domain/anatomy/globe.ts';
 import {
   INSERTION_BREADTH_MM,
   insertionMm,
@@ -155,6 +155,8 @@ export const globeFrom = (record: CaseRecord): GlobeModel | null => {
       to: curve(wholeRound, (clock) => oraRangeMm(clock, eye)[1]),
     },
     equatorMm: equatorMm(globe),
+    poleMm: poleMm(globe),
+    eye,
     muscles: (Object.keys(insertionsMm) as Rectus[]).map((rectus) => ({
       name: recti[rectus],
       clock: rectusClock(rectus, eye),

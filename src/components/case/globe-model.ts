@@ -44,6 +44,8 @@ export interface GlobeModel {
   /** Where the ora may lie. */
   ora: { from: readonly GlobePoint[]; to: readonly GlobePoint[] };
   equatorMm: number;
+  poleMm: number;
+  eye: 'right' | 'left';
   muscles: readonly GlobeMuscle[];
   detached: GlobeArea | null;
   elements: readonly GlobeElement[];

@@ -113,6 +113,12 @@ export const pageKeys: readonly PageKey[] = [
     does: 'record, sheet or margin, on a small screen',
     run: (store) => store.show(panes[(panes.indexOf(store.get().pane) + 1) % panes.length] ?? 'record'),
   },
+  {
+    codes: ['KeyD'],
+    printed: 'D',
+    does: 'drawing: the wall laid flat, or fundus and bubble',
+    run: (store) => store.turnPicture(),
+  },
   { codes: ['KeyS'], printed: 'S', does: 'save now', run: (_, actions) => actions.save() },
   { codes: ['KeyX'], printed: 'X', does: 'sign', run: (_, actions) => actions.sign() },
   { codes: ['Slash'], printed: '?', does: 'all keys', run: (_, actions) => actions.help() },
