@@ -5,7 +5,7 @@ export interface Clause {
   plain: string;
   start: number;
   /** What it is about, when that is not this operation on this eye. */
-  about: 'this-operation' | 'elsewhere';
+  about: 'this-operation' | 'history' | 'elsewhere';
 }
 
 const plainSigns: Readonly<Record<string, string>> = {
@@ -36,16 +36,28 @@ export const plainText = (text: string): string =>
 const boundary =
   /(?<!\b(?:approx|dr|mr|mrs|ms|prof|no|vs|e\.g|i\.e|ca|st))[.!?](?=\s|$)|[;\n]|,? (?=but |whereas |although |though )|, (?=while |which )/g;
 
-/** Words that move a clause to the other eye, another time, a wish, a condition or somebody else's mouth. */
+/** Words that move a clause to the other eye, a wish, a condition, a general remark or somebody else's mouth. */
 const elsewhere: readonly RegExp[] = [
   /\b(?:fellow|contralateral|other|opposite|second|unoperated|better|good|only)(?: (?:right|left))? eye\b|\bfellow\b/,
   /\b(?:both eyes|either eye|each eye|bilateral(?:ly)?)\b/,
-  /\b(?:previous(?:ly)?|prior|past|historic(?:al(?:ly)?)?|formerly|earlier|ago|history|had (?:been|already|undergone|had)|since childhood|years? before|last (?:year|month|time)|in (?:19|20)\d\d|family)\b/,
-  /\b(?:if|unless|should (?:the|it|there|any|he|she|they|a|pressure|re)|in case|in the event|would|could|might|may|risk of|possib(?:le|ly|ility)|in theory|otherwise)\b/,
-  /\b(?:consider(?:ed|ing)?|discussed|option|alternative|rather than|instead of|as opposed to|planned (?:but|initially)|initially planned|original plan|was planned|had planned|intended)\b/,
-  /\b(?:referral|letter|referrer|referred|optometrist|patient) (?:\w+ )?(?:states?|said|says|reported|reports|described|describes|wrote|thought|mentioned|believed|suggested)\b/,
-  /\b(?:according to|quoted?|reportedly|labelled|literature|textbook|studies|published|guidelines?)\b/,
+  /\b(?:if|unless|should (?:the|it|there|any|he|she|they|a|pressure|re|cataract)|were the|had the|in case|in the event|would|could|might|may(?! (?:19|20)\d\d)|risk of|possib(?:le|ly|ility)|in theory|otherwise)\b/,
+  /\b(?:consider(?:ed|ing)?|discussed|option|alternative|rather than|instead of|as opposed to|planned (?:but|initially)|initially planned|original plan|was planned|had planned|intended|thought (?:too|about)|at hand|out of stock|not available|kept for|offered)\b/,
+  /\b(?:often|usually|(?:is|are) (?:the )?usual|generally|in general|tends? to|gives?|more likely|can (?:follow|stay)|known risk|formation)\b/,
+  /\b(?:planned|scheduled|listed) (?:for|elsewhere)|\bis planned\b|\b(?:will|to) be (?:needed|considered|required|tried|thought)\b|\bthereafter\b|\bwe may\b/,
+  /\b(?:referral|letter|referrer|referred|optometrist|patient|she|he|they) (?:\w+ )?(?:states?|said|says|reported|reports|described|describes|wrote|thought|mentioned|believed|suggested)\b/,
+  /\b(?:according to|quoted?|reportedly|labelled|literature|textbook|studies|published|guidelines?|told (?:of|about)|heard of)\b/,
 ];
+
+/** Words that move a clause to an earlier time. */
+const earlier =
+  /\b(?:previous(?:ly)?|prior|(?<!half )past|historic(?:al(?:ly)?)?|formerly|earlier|ago|history|had (?:undergone|had)|since childhood|years? before|last (?:year|month|time)|first operation|after (?:her|his|the|their) (?:\w+ )?(?:cataract|macular hole|first|previous) |in (?:(?:january|february|march|april|may|june|july|august|september|october|november|december) )?(?:19|20)\d\d|in (?:january|february|march|april|may|june|july|august|september|october|november|december)\b|family|(?:her|his) (?:mother|father|brother|sister|son|daughter))\b/;
+
+const aboutOf = (plain: string): Clause['about'] =>
+  elsewhere.some((words) => words.test(plain))
+    ? 'elsewhere'
+    : earlier.test(plain)
+      ? 'history'
+      : 'this-operation';
 
 const quoted = /"[^"]*"/g;
 
@@ -61,7 +73,7 @@ export const clausesOf = (text: string): Clause[] => {
         text: text.slice(start, end),
         plain: piece,
         start,
-        about: elsewhere.some((words) => words.test(piece)) ? 'elsewhere' : 'this-operation',
+        about: aboutOf(piece),
       });
     }
     start = end;

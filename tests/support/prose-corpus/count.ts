@@ -8,13 +8,13 @@ export const count = samplesOf('count', {
       'A [[four]]-port vitrectomy was done.',
       'Detachment of [[three quadrants]].',
       '[[Two]] horseshoe tears in the superotemporal quadrant.',
-      '[[23G]] three-port PPV.',
-      'A [[27-gauge]] vitrectomy was performed.',
+      '[[length=23G]] three-port PPV.',
+      'A [[length=27-gauge]] vitrectomy was performed.',
       'Laser, [[1200]] burns.',
       'Laser [[850]] spots in 3 rows.',
       'The [[four]] breaks were lasered.',
       '[[Five]] rows of laser round the tear.',
-      '[[20 gauge]] vitrectomy under sub-Tenon’s.',
+      '[[length=20 gauge]] vitrectomy under sub-Tenon’s.',
     ],
     clean: [
       'There was one break, lasered.',
@@ -68,7 +68,7 @@ export const count = samplesOf('count', {
     faults: [
       '[[Two]] breaks were found and frozen.',
       'A total of [[five]] breaks.',
-      '[[25G]] PPV with phaco and band.',
+      '[[length=25G]] PPV with phaco and band.',
       '[[4]] quadrants detached.',
       'There were [[three]] horseshoe tears and one round hole.',
       'Cryo × [[20]] applications.',
@@ -84,7 +84,7 @@ export const count = samplesOf('count', {
   },
   oilLeft: {
     faults: [
-      '[[25 gauge]] PPV, peel, oil.',
+      '[[length=25 gauge]] PPV, peel, oil.',
       '[[Three]]-port vitrectomy.',
       'Laser [[300]] shots in 360°.',
       '[[Three]] breaks, all lasered.',
@@ -113,7 +113,7 @@ export const count = samplesOf('count', {
   },
   giantLeft: {
     faults: [
-      '[[25-gauge]] vitrectomy with PFCL.',
+      '[[length=25-gauge]] vitrectomy with PFCL.',
       'A tear of [[six]] clock hours.',
       'Laser, [[two]] rows.',
       'GRT [[8]] clock hours',

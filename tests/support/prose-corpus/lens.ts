@@ -110,7 +110,7 @@ export const lens = samplesOf('lens', {
     faults: [
       '[[Phaco]]vitrectomy with PFCL and C2F6.',
       'The [[pseudophakic]] left eye had a giant tear.',
-      'The lens was removed by [[phacoemulsification]].',
+      'The [[lens was removed by phacoemulsification]].',
       '[[IOL]] put in the bag at the end.',
     ],
     clean: [

@@ -9,11 +9,12 @@ const names: readonly { agent: string; words: string }[] = [
   {
     agent: 'silicone-oil',
     words:
-      '(?<!heavy )(?:light )?silicone oil|\\boil (?:tamponade|fill)|(?:1[,. ]?000|1[,. ]?300|5[,. ]?000) ?c(?:st|s|entistokes?)(?: oil)?',
+      '(?<!heavy )(?:light )?silicone oil|\\boil (?:tamponade|fill)|(?:air|fluid|pfcl|liquid|heavy liquid)[- ]oil(?: exchange)?|sio\\b|(?:1[,. ]?000|1[,. ]?300|5[,. ]?000) ?c(?:st|s|entistokes?)(?: oil)?',
   },
   {
     agent: 'air',
-    words: 'air (?:tamponade|bubble|fill)|(?:left|leaving|filled) (?:with|under|in) air|under air(?! fluid)',
+    words:
+      'air (?:tamponade|bubble|fill|injection|injected|0\\.\\d)|(?:left|leaving|filled) (?:with|under|in) air|under air at (?:the )?end|(?:retinopexy|pneumatic) with air',
   },
 ];
 
@@ -25,7 +26,7 @@ const percentBefore = new RegExp(
   'g',
 );
 const percentAfter = new RegExp(
-  `(?:${allNames})(?:,| gas)?(?: at| of| mixture of| mixed to| to| diluted to| in a concentration of| \\(| -)? ?\\(?(${FIGURE}) ?(?:%|per ?cent)(?! (?:of|fill))`,
+  `(?:${allNames})(?:,| gas)?(?: at a concentration of| at| of| mixture of| mixed to| to| diluted to| in a concentration of| -)? ?(?:\\((?:[a-z-]+, ?)?)?(${FIGURE}) ?(?:%|per ?cent)(?! (?:of|fill))`,
   'g',
 );
 
@@ -37,8 +38,8 @@ const recordedName: Readonly<Record<string, string>> = {
 };
 
 /** Air is exchanged on the way, oil is taken out of old cases: those words do not name what was left in. */
-const onTheWay =
-  /(?:air[- ]fluid|fluid[- ]air|air[- ](?:oil|gas)|exchange(?:d)? (?:for|of) air|remov(?:al|ed) of|oil[- ](?:remov|out)|ex-?oil)/;
+const airOnTheWay = /air[- ]fluid|fluid[- ]air|exchange(?:d)? (?:for|of) air/;
+const outOfTheEye = /remov(?:al|ed) of|oil[- ](?:remov|out)|ex-?oil/;
 
 const readAgent: Reader = (clause, record) => {
   const agent = record.tamponade?.agent;
@@ -48,7 +49,7 @@ const readAgent: Reader = (clause, record) => {
   for (const match of clause.plain.matchAll(anyAgent)) {
     const named = agentOf(match[0]);
     const around = clause.plain.slice(Math.max(0, match.index - 14), match.index + match[0].length);
-    if (named === undefined || onTheWay.test(around)) continue;
+    if (named === undefined || (named === 'air' ? airOnTheWay : outOfTheEye).test(around)) continue;
     const negated =
       negatedAt(clause.plain, match.index) || negatedAfter(clause.plain, match.index + match[0].length);
     if (
@@ -75,6 +76,38 @@ const readConcentration: Reader = (clause, record) => {
     );
 };
 
+const pureWords = /\b(pure|undiluted|neat|diluted)\b/g;
+
+/** Gas said to be pure that was diluted, or the other way round. */
+const readMixing: Reader = (clause, { tamponade }) => {
+  const mixing = tamponade?.mixing;
+  if (mixing === undefined || mixing === 'not-applicable') return [];
+  if (!/\b(?:gas|sf-?6|c2f6|c3f8|hexafluor\w+|perfluoropropane|octafluoropropane)\b/.test(clause.plain))
+    return [];
+  return [...clause.plain.matchAll(pureWords)]
+    .filter(
+      (match) =>
+        (match[1] === 'diluted' ? 'diluted' : 'pure') !== mixing &&
+        !negatedAt(clause.plain, match.index) &&
+        !/^ (?:\d|ml)|made up|diluted (?:to|with)/.test(clause.plain.slice(match.index + match[0].length)),
+    )
+    .map((match) => deny('concentration', clause, spanOf(match), 'tamponade.mixing', mixing));
+};
+
+const gasPutIn =
+  /\b(?:(?:filled|full|left|exchanged|exchange) (?:with|of|for) gas|air[- ]gas|gas (?:tamponade|bubble|fill)|(?:long|short)-acting gas)\b/g;
+
+/** Gas without its name, in an eye that holds none. */
+const readGas: Reader = (clause, { tamponade }) => {
+  const agent = tamponade?.agent;
+  if (agent === undefined || !(agent === 'none' || agent === 'air' || agent.endsWith('oil'))) return [];
+  return [...clause.plain.matchAll(gasPutIn)]
+    .filter(
+      (match) => !negatedAt(clause.plain, match.index) && !(agent === 'air' && match[0].startsWith('gas')),
+    )
+    .map((match) => deny('agent', clause, spanOf(match), 'tamponade.agent', recordedName[agent] ?? agent));
+};
+
 const noTamponade =
   /\b(?:no|without(?: any)?) (?:gas|oil|tamponade|internal tamponade|intraocular (?:gas|tamponade))\b(?! (?:leak|bubble in|in the anterior|under|escape|was lost))/g;
 
@@ -92,6 +125,12 @@ const readNone: Reader = (clause, record) => {
 
 /** Agent left in the eye and its concentration. */
 export const readTamponade: Reader = (clause, record) =>
-  clause.about === 'elsewhere'
+  clause.about !== 'this-operation'
     ? []
-    : [...readAgent(clause, record), ...readConcentration(clause, record), ...readNone(clause, record)];
+    : [
+        ...readAgent(clause, record),
+        ...readConcentration(clause, record),
+        ...readMixing(clause, record),
+        ...readGas(clause, record),
+        ...readNone(clause, record),
+      ];
