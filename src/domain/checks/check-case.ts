@@ -1,7 +1,7 @@
 import type { Sheet, Statement } from '../drafting/sheet.ts';
 import { readProse } from '../prose/read.ts';
 import type { CaseRecord } from '../record/schema.ts';
-import { checkRecord } from './engine.ts';
+import { checkRecord, type Settings } from './engine.ts';
 import { type Flag, levels } from './flag.ts';
 
 /** Statements without which a note lacks what the published standards require; a reason may answer their absence. */
@@ -48,14 +48,13 @@ const takenOut = ({ id, drafted, reads, origin }: Statement): Flag[] =>
  * The flags of a case: what the rules find in its record, and what its sheet says against it or leaves out. Drafted words cannot
  * disagree with the facts that they were made from, so only what people wrote is read.
  */
-export const checkCase = (record: CaseRecord, sheet: Sheet): Flag[] => {
+export const checkCase = (record: CaseRecord, sheet: Sheet, settings: Settings = {}): Flag[] => {
   const statements = sheet.sections.flatMap((section) => section.statements);
   const ofSheet = [
     ...statements.filter(isTyped).flatMap((statement) => deniedWords(statement, record)),
     ...statements.flatMap(takenOut),
   ];
-  if (ofSheet.length === 0) return checkRecord(record);
-  return [...checkRecord(record), ...ofSheet].sort(
-    (a, b) => levels.indexOf(a.level) - levels.indexOf(b.level),
-  );
+  const found = checkRecord(record, settings);
+  if (ofSheet.length === 0) return found;
+  return [...found, ...ofSheet].sort((a, b) => levels.indexOf(a.level) - levels.indexOf(b.level));
 };

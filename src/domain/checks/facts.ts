@@ -1,5 +1,5 @@
 import type { ClockArc } from '../anatomy/clock.ts';
-import { dateWords, labelOf, listWords, numberWords } from '../drafting/words.ts';
+import { dateWords, labelOf, listWords, numberWords, timesWords } from '../drafting/words.ts';
 import { isGas } from '../physics/gas.ts';
 import type {
   BuckleElement,
@@ -79,7 +79,7 @@ export const ageOf = (record: CaseRecord): number | undefined => {
 export const elementName = (element: BuckleElement, index: number): string =>
   element.role === 'encircling' ? 'The band' : `Element ${index + 1}`;
 
-export { dateWords, labelOf, listWords, numberWords };
+export { dateWords, labelOf, listWords, numberWords, timesWords };
 
 /** Where the retina is detached: an arc, the whole round, or `undefined` while it is not recorded. */
 export const detachedArcOf = (record: CaseRecord): ClockArc | 'all' | undefined => {
@@ -94,3 +94,12 @@ export const missingFrom = <T extends { value: unknown }>(items: readonly T[]): 
 
 /** The same words with a capital at the start. */
 export const capital = (words: string): string => words.charAt(0).toUpperCase() + words.slice(1);
+
+/**
+ * How far a break may reach to each side of its clock hour, hours. Where its extent is not recorded, as far as its kind may reach; tears
+ * and holes of three hours are giant tears.
+ */
+export const reachOf = ({ kind, extentClockHours }: RetinalBreak): number =>
+  kind === 'giant-tear' || kind === 'dialysis' || kind === undefined
+    ? (extentClockHours ?? 12) / 2
+    : Math.min(extentClockHours ?? 3, 3) / 2;

@@ -36,6 +36,7 @@ import { rule as breakOffTheRetina } from './rules/break-off-the-retina/rule.ts'
 import { rule as breakUnsupported } from './rules/break-unsupported/rule.ts';
 import { rule as breakWithoutRetinopexy } from './rules/break-without-retinopexy/rule.ts';
 import { rule as breaksInSerousDetachment } from './rules/breaks-in-serous-detachment/rule.ts';
+import { rule as breaksOpenAtEnd } from './rules/breaks-open-at-end/rule.ts';
 import { rule as broadElementInOlderPatient } from './rules/broad-element-in-older-patient/rule.ts';
 import { rule as bubbleSmallerThanBreak } from './rules/bubble-smaller-than-break/rule.ts';
 import { rule as buckleWithoutOpening } from './rules/buckle-without-opening/rule.ts';
@@ -83,6 +84,7 @@ import { rule as expansileConcentration } from './rules/expansile-concentration/
 import { rule as expiredImplant } from './rules/expired-implant/rule.ts';
 import { rule as extentAgainstQuadrants } from './rules/extent-against-quadrants/rule.ts';
 import { rule as extentHalfRecorded } from './rules/extent-half-recorded/rule.ts';
+import { rule as extentOfLargeTearMissing } from './rules/extent-of-large-tear-missing/rule.ts';
 import { rule as fixationIncomplete } from './rules/fixation-incomplete/rule.ts';
 import { rule as fixationOffTheElement } from './rules/fixation-off-the-element/rule.ts';
 import { rule as fixedDateForFlying } from './rules/fixed-date-for-flying/rule.ts';
@@ -122,6 +124,7 @@ import { rule as lateReview } from './rules/late-review/rule.ts';
 import { rule as latticeTreatedWithoutRetinopexy } from './rules/lattice-treated-without-retinopexy/rule.ts';
 import { rule as lensBeforeAgainstHistory } from './rules/lens-before-against-history/rule.ts';
 import { rule as lensImplantInPhakicEye } from './rules/lens-implant-in-phakic-eye/rule.ts';
+import { rule as lensImplantIncomplete } from './rules/lens-implant-incomplete/rule.ts';
 import { rule as lensRemovedImplantNotRecorded } from './rules/lens-removed-implant-not-recorded/rule.ts';
 import { rule as lensTouchWithoutLens } from './rules/lens-touch-without-lens/rule.ts';
 import { rule as lensWorkAgainstLens } from './rules/lens-work-against-lens/rule.ts';
@@ -143,6 +146,7 @@ import { rule as muscleOffTheSegment } from './rules/muscle-off-the-segment/rule
 import { rule as musclesAgainstBand } from './rules/muscles-against-band/rule.ts';
 import { rule as needleBlockAnticoagulated } from './rules/needle-block-anticoagulated/rule.ts';
 import { rule as nitrousOxideAndGas } from './rules/nitrous-oxide-and-gas/rule.ts';
+import { rule as nitrousOxideNotRecorded } from './rules/nitrous-oxide-not-recorded/rule.ts';
 import { rule as nitrousOxideStoppedOutsideOperation } from './rules/nitrous-oxide-stopped-outside-operation/rule.ts';
 import { rule as nitrousOxideToTheEnd } from './rules/nitrous-oxide-to-the-end/rule.ts';
 import { rule as noAntisepsis } from './rules/no-antisepsis/rule.ts';
@@ -175,6 +179,7 @@ import { rule as postureWithoutTamponade } from './rules/posture-without-tampona
 import { rule as preoperativeDiagnosisNotBorneOut } from './rules/preoperative-diagnosis-not-borne-out/rule.ts';
 import { rule as prescribedTwice } from './rules/prescribed-twice/rule.ts';
 import { rule as pressureAtEnd } from './rules/pressure-at-end/rule.ts';
+import { rule as previousOperationIncomplete } from './rules/previous-operation-incomplete/rule.ts';
 import { rule as pseudophakicWithoutCataractSurgery } from './rules/pseudophakic-without-cataract-surgery/rule.ts';
 import { rule as pureGasAtFullFill } from './rules/pure-gas-at-full-fill/rule.ts';
 import { rule as pvrDWithoutTotalDetachment } from './rules/pvr-d-without-total-detachment/rule.ts';
@@ -182,6 +187,8 @@ import { rule as pvrExtentMissing } from './rules/pvr-extent-missing/rule.ts';
 import { rule as pvrGradeOfOtherEdition } from './rules/pvr-grade-of-other-edition/rule.ts';
 import { rule as pvrHoursWithoutGradeC } from './rules/pvr-hours-without-grade-c/rule.ts';
 import { rule as pvrMembranesWithoutPvr } from './rules/pvr-membranes-without-pvr/rule.ts';
+import { rule as pvrNotGraded } from './rules/pvr-not-graded/rule.ts';
+import { rule as recurrenceWithoutHistory } from './rules/recurrence-without-history/rule.ts';
 import { rule as referrerMissing } from './rules/referrer-missing/rule.ts';
 import { rule as referrerWithoutName } from './rules/referrer-without-name/rule.ts';
 import { rule as refractionAgainstAxialLength } from './rules/refraction-against-axial-length/rule.ts';
@@ -224,7 +231,9 @@ import { rule as tamponadeDetailsWithoutAgent } from './rules/tamponade-details-
 import { rule as temporaryClosurePermanentBand } from './rules/temporary-closure-permanent-band/rule.ts';
 import { rule as temporaryElementWithoutRemovalPlan } from './rules/temporary-element-without-removal-plan/rule.ts';
 import { rule as tensionAboveClosingPressure } from './rules/tension-above-closing-pressure/rule.ts';
+import { rule as tensionWithoutShortening } from './rules/tension-without-shortening/rule.ts';
 import { rule as thickerThanItsForm } from './rules/thicker-than-its-form/rule.ts';
+import { rule as thrombosisProphylaxisMissing } from './rules/thrombosis-prophylaxis-missing/rule.ts';
 import { rule as tightenedWithoutPressure } from './rules/tightened-without-pressure/rule.ts';
 import { rule as timeOutAfterStart } from './rules/time-out-after-start/rule.ts';
 import { rule as timeOutNotTimed } from './rules/time-out-not-timed/rule.ts';
@@ -239,7 +248,9 @@ import { rule as underBandWithoutBand } from './rules/under-band-without-band/ru
 import { rule as untreatedBreakAmongTargets } from './rules/untreated-break-among-targets/rule.ts';
 import { rule as vitrectomyDetailsWithoutVitrectomy } from './rules/vitrectomy-details-without-vitrectomy/rule.ts';
 import { rule as vitrectomyIncomplete } from './rules/vitrectomy-incomplete/rule.ts';
+import { rule as warningSignsLeftOut } from './rules/warning-signs-left-out/rule.ts';
 import { rule as widePortsSutureless } from './rules/wide-ports-sutureless/rule.ts';
+import { rule as wristbandNotGiven } from './rules/wristband-not-given/rule.ts';
 
 /** Changes whenever a rule comes, goes or asks something else; kept with every signature. */
 export const RULES_VERSION = '2026-12-02';
@@ -283,6 +294,7 @@ export const rules: readonly Rule[] = [
   breakUnsupported,
   breakWithoutRetinopexy,
   breaksInSerousDetachment,
+  breaksOpenAtEnd,
   broadElementInOlderPatient,
   bubbleSmallerThanBreak,
   buckleWithoutOpening,
@@ -330,6 +342,7 @@ export const rules: readonly Rule[] = [
   expiredImplant,
   extentAgainstQuadrants,
   extentHalfRecorded,
+  extentOfLargeTearMissing,
   fixationIncomplete,
   fixationOffTheElement,
   fixedDateForFlying,
@@ -369,6 +382,7 @@ export const rules: readonly Rule[] = [
   latticeTreatedWithoutRetinopexy,
   lensBeforeAgainstHistory,
   lensImplantInPhakicEye,
+  lensImplantIncomplete,
   lensRemovedImplantNotRecorded,
   lensTouchWithoutLens,
   lensWorkAgainstLens,
@@ -390,6 +404,7 @@ export const rules: readonly Rule[] = [
   musclesAgainstBand,
   needleBlockAnticoagulated,
   nitrousOxideAndGas,
+  nitrousOxideNotRecorded,
   nitrousOxideStoppedOutsideOperation,
   nitrousOxideToTheEnd,
   noAntisepsis,
@@ -422,6 +437,7 @@ export const rules: readonly Rule[] = [
   preoperativeDiagnosisNotBorneOut,
   prescribedTwice,
   pressureAtEnd,
+  previousOperationIncomplete,
   pseudophakicWithoutCataractSurgery,
   pureGasAtFullFill,
   pvrDWithoutTotalDetachment,
@@ -429,6 +445,8 @@ export const rules: readonly Rule[] = [
   pvrGradeOfOtherEdition,
   pvrHoursWithoutGradeC,
   pvrMembranesWithoutPvr,
+  pvrNotGraded,
+  recurrenceWithoutHistory,
   referrerMissing,
   referrerWithoutName,
   refractionAgainstAxialLength,
@@ -471,7 +489,9 @@ export const rules: readonly Rule[] = [
   temporaryClosurePermanentBand,
   temporaryElementWithoutRemovalPlan,
   tensionAboveClosingPressure,
+  tensionWithoutShortening,
   thickerThanItsForm,
+  thrombosisProphylaxisMissing,
   tightenedWithoutPressure,
   timeOutAfterStart,
   timeOutNotTimed,
@@ -486,5 +506,7 @@ export const rules: readonly Rule[] = [
   untreatedBreakAmongTargets,
   vitrectomyDetailsWithoutVitrectomy,
   vitrectomyIncomplete,
+  warningSignsLeftOut,
   widePortsSutureless,
+  wristbandNotGiven,
 ];

@@ -14,6 +14,10 @@ export const rule = defineRule({
   answerable: false,
   check: (record) =>
     elementsOf(record).flatMap((element, index) => {
+      if (isEncircling(element) && element.lengthMm !== undefined && element.lengthMm < 35) {
+        const message = `The band is recorded as ${numberWords(element.lengthMm)} mm long, which goes round no eye.`;
+        return [{ fields: [`buckle.elements.${index}.lengthMm`], message }];
+      }
       const { lengthMm, shortenedMm, frontEdgeMm, frontEdgeReference } = element;
       const axialLengthMm = record.before?.axialLengthMm;
       if (
@@ -39,6 +43,11 @@ export const rule = defineRule({
     }),
   examples: {
     fires: [
+      {
+        name: '12.5 for 125',
+        fields: 'buckle.elements.0.lengthMm',
+        record: { buckle: { elements: [{ role: 'encircling', lengthMm: 12.5 }] } },
+      },
       {
         name: '40 mm',
         fields: 'buckle.elements.0.lengthMm',

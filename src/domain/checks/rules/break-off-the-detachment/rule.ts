@@ -1,6 +1,6 @@
 import { hoursApart, onArc, showClock } from '../../../anatomy/clock.ts';
 import { defineRule } from '../../define-rule.ts';
-import { breaksOf, detachedArcOf } from '../../facts.ts';
+import { breaksOf, detachedArcOf, reachOf } from '../../facts.ts';
 
 export const rule = defineRule({
   id: 'break-off-the-detachment',
@@ -17,7 +17,8 @@ export const rule = defineRule({
     const { from, to } = arc;
     // An older buckle, laser or scar holds retina flat inside a detachment.
     const untouched = recurrent === false && previousOperations === 'none' && diagnosis === 'rhegmatogenous';
-    return breaksOf(record).flatMap(({ clock, kind, onDetachedRetina, extentClockHours }, index) => {
+    return breaksOf(record).flatMap((found, index) => {
+      const { clock, kind, onDetachedRetina, extentClockHours } = found;
       if (
         clock === undefined ||
         kind === undefined ||
@@ -25,7 +26,7 @@ export const rule = defineRule({
         onDetachedRetina === undefined
       )
         return [];
-      const half = (extentClockHours ?? 6) / 2;
+      const half = reachOf(found);
       const inside = onArc(clock, arc);
       const depth = Math.min(hoursApart(clock, from), hoursApart(clock, to));
       const outside = onDetachedRetina && !inside && depth > half + 0.5;

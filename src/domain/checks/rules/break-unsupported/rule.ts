@@ -17,6 +17,9 @@ export const rule = defineRule({
     )
       return [];
     if (record.tamponade?.agent === undefined) return [];
+    // Heavy liquid left in the eye closes a break for a while.
+    const liquid = record.vitreous?.heavyLiquid;
+    if (liquid === 'left' || liquid === 'not-removed') return [];
     return breaksOf(record).flatMap(({ supportedByElements, onDetachedRetina, kind }, index) =>
       supportedByElements !== 'none' || onDetachedRetina === false || kind === 'macular-hole'
         ? []

@@ -11,6 +11,9 @@ export const rule = defineRule({
   answerable: true,
   check: (record) => {
     const treatments = record.retinopexy?.treatments;
+    // While nothing at all is said of retinopexy, that is what is missing.
+    if (treatments === undefined && breaksOf(record).every(({ treatedBy }) => treatedBy === undefined))
+      return [];
     const all = treatmentsOf(record);
     if (
       all.some(
@@ -38,7 +41,26 @@ export const rule = defineRule({
     ];
   },
   examples: {
-    fires: [{ name: 'none', fields: 'retinopexy.treatments', record: { breaks: { found: [{ clock: 2 }] } } }],
+    fires: [
+      {
+        name: 'none',
+        fields: 'breaks.found.0.treatedBy',
+        record: { breaks: { found: [{ clock: 2 }] }, retinopexy: { treatments: 'none' } },
+      },
+      {
+        name: 'one of two',
+        fields: 'breaks.found.1.treatedBy',
+        record: {
+          breaks: { found: [{ clock: 2 }, { clock: 5 }] },
+          retinopexy: { treatments: [{ modality: 'cryo', targets: [1] }] },
+        },
+      },
+      {
+        name: 'said of the break',
+        fields: 'retinopexy.treatments',
+        record: { breaks: { found: [{ clock: 2, treatedBy: ['none'] }] } },
+      },
+    ],
     silent: [
       {
         name: 'cryo to all',
@@ -49,6 +71,9 @@ export const rule = defineRule({
       },
       { name: 'macular hole', record: { breaks: { found: [{ kind: 'macular-hole' }] } } },
     ],
-    unknown: [{ name: 'no break recorded', record: { retinopexy: { treatments: 'none' } } }],
+    unknown: [
+      { name: 'no break recorded', record: { retinopexy: { treatments: 'none' } } },
+      { name: 'nothing said of retinopexy', record: { breaks: { found: [{ clock: 2 }] } } },
+    ],
   },
 });

@@ -1,6 +1,6 @@
 import { hoursApart, onArc, showClock } from '../../../anatomy/clock.ts';
 import { defineRule } from '../../define-rule.ts';
-import { breaksOf, elementsOf } from '../../facts.ts';
+import { breaksOf, elementsOf, reachOf } from '../../facts.ts';
 
 export const rule = defineRule({
   id: 'element-away-from-break',
@@ -13,7 +13,8 @@ export const rule = defineRule({
   unless: ['support-misses-break'],
   check: (record) => {
     const elements = elementsOf(record);
-    return breaksOf(record).flatMap(({ clock, supportedByElements, kind, extentClockHours }, index) => {
+    return breaksOf(record).flatMap((found, index) => {
+      const { clock, supportedByElements, kind } = found;
       if (clock === undefined || kind === undefined || !Array.isArray(supportedByElements)) return [];
       const reach = (number: number): boolean => {
         const { role, fromClock, toClock, meridianClock } = elements[number - 1] ?? {};
@@ -21,12 +22,11 @@ export const rule = defineRule({
           const arc = { from: fromClock, to: toClock };
           return (
             onArc(clock, arc) ||
-            Math.min(hoursApart(clock, fromClock), hoursApart(clock, toClock)) <=
-              0.5 + (extentClockHours ?? 3) / 2
+            Math.min(hoursApart(clock, fromClock), hoursApart(clock, toClock)) <= 0.5 + reachOf(found)
           );
         }
         if (role === 'meridional' && meridianClock !== undefined)
-          return hoursApart(clock, meridianClock) <= 1 + (extentClockHours ?? 3) / 2;
+          return hoursApart(clock, meridianClock) <= 1 + reachOf(found);
         return true;
       };
       if (supportedByElements.some(reach)) return [];

@@ -17,13 +17,14 @@ export const rule = defineRule({
         !isEncircling(element) ||
         shortenedMm === undefined ||
         heightMm === undefined ||
+        form === undefined ||
         element.imbricatedOver !== undefined
       )
         return [];
       // The bound is for a flush, thin band on its own: thickness and sutures that sink it add to what is seen.
       const others =
         elementsOf(record).length > 1 || form === 'tyre' || form === 'round-sponge' || form === 'oval-sponge';
-      const most = heightFromShortening(shortenedMm) + (element.thicknessMm ?? 1.25) + 0.75;
+      const most = heightFromShortening(shortenedMm) + Math.min(element.thicknessMm ?? 2, 2) + 0.75;
       if (others || heightMm <= most) return [];
       const message = `Shortened by ${numberWords(shortenedMm)} mm, the band gives at most ${numberWords(Math.round(heightFromShortening(shortenedMm) * 10) / 10)} mm of height and its own thickness; ${numberWords(heightMm)} mm is recorded.`;
       return [
@@ -35,13 +36,15 @@ export const rule = defineRule({
       {
         name: '4 mm of height from 3 mm',
         fields: 'buckle.elements.0.heightMm',
-        record: { buckle: { elements: [{ role: 'encircling', shortenedMm: 3, heightMm: 4 }] } },
+        record: { buckle: { elements: [{ role: 'encircling', form: 'band', shortenedMm: 3, heightMm: 4 }] } },
       },
     ],
     silent: [
       {
         name: '0.8 mm from 5 mm',
-        record: { buckle: { elements: [{ role: 'encircling', shortenedMm: 5, heightMm: 0.8 }] } },
+        record: {
+          buckle: { elements: [{ role: 'encircling', form: 'band', shortenedMm: 5, heightMm: 0.8 }] },
+        },
       },
     ],
     unknown: [

@@ -1,5 +1,5 @@
 import { defineRule } from '../../define-rule.ts';
-import { elementsOf, lensImplantOf } from '../../facts.ts';
+import { elementsOf, lensImplantOf, oilOf } from '../../facts.ts';
 
 export const rule = defineRule({
   id: 'implant-without-lot',
@@ -18,6 +18,7 @@ export const rule = defineRule({
       ...elementsOf(record).flatMap(({ lot }, index) =>
         lot === undefined ? [`buckle.elements.${index}.lot`] : [],
       ),
+      ...(oilOf(record) !== undefined && record.tamponade?.lot === undefined ? ['tamponade.lot'] : []),
       ...(lens !== undefined && lens.lot === undefined ? ['vitreous.lensImplant.lot'] : []),
     ];
     if (fields.length === 0) return [];
@@ -36,6 +37,7 @@ export const rule = defineRule({
       },
     ],
     silent: [
+      { name: 'gas is no implant', record: { tamponade: { agent: 'SF6' } } },
       { name: 'lot recorded', record: { buckle: { elements: [{ role: 'encircling', lot: 'D4471' }] } } },
     ],
     unknown: [{ name: 'no elements recorded', record: { buckle: {} } }],

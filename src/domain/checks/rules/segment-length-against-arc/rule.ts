@@ -19,8 +19,8 @@ export const rule = defineRule({
       const axial = record.before?.axialLengthMm;
       const hours = arcHours({ from: fromClock, to: toClock });
       // Anywhere from the insertions to behind the equator, in any eye where its length is not known.
-      const least = hours * hourMm(globeOf(axial ?? 20), 6) * 0.7 - 1;
-      const most = hours * hourMm(globeOf(axial ?? 34), 12) * 1.35 + 2;
+      const least = hours * hourMm(globeOf(Math.max(axial ?? 20, 20)), 6) * 0.7 - 1;
+      const most = hours * hourMm(globeOf(Math.min(axial ?? 34, 34)), 12) * 1.35 + 2;
       if (lengthMm >= least && lengthMm <= most) return [];
       return [
         {

@@ -26,11 +26,17 @@ export const rule = defineRule({
         return [];
       const named = supportedByElements.flatMap((number) => elements[number - 1] ?? []);
       const lying = layBreak(found, globe, eye);
+      // Without its meridian it is open whether an implant under the band lies along or across it.
+      if (named.some(({ role, meridianClock }) => role === 'under-band' && meridianClock === undefined))
+        return [];
       const laid = named.map((element) => layElement(element, globe, eye));
       if (lying === undefined || lying.fromZone || laid.length === 0 || laid.includes(undefined)) return [];
       const all = laid.filter((element) => element !== undefined);
-      const { shortfallMm, bare } = supportByAll(lying, all);
-      if (bare === 0 && shortfallMm <= 1) return [];
+      // Beside its whole length, each edge and the middle on its own: a short break beside the element is missed as well.
+      const parts = [lying, { ...lying, backMm: lying.frontMm }, { ...lying, frontMm: lying.backMm }];
+      const shortfallMm = Math.max(...parts.map((part) => supportByAll(part, all).shortfallMm));
+      const middleBare = supportByAll({ ...lying, halfHours: 0 }, all).bare > 0;
+      if (!middleBare && supportByAll(lying, all).bare <= 0.4 && shortfallMm <= 1) return [];
       const edges = all.map((element) => element.at(clock)).find((at) => at !== null);
       const message =
         edges === undefined || edges === null
@@ -41,7 +47,7 @@ export const rule = defineRule({
           fields: [
             `breaks.found.${index}.supportedByElements`,
             `breaks.found.${index}.frontEdgeMm`,
-            'buckle.elements.0.frontEdgeMm',
+            `buckle.elements.${(supportedByElements[0] ?? 1) - 1}.frontEdgeMm`,
           ],
           message,
         },
