@@ -140,6 +140,25 @@ export const auditLog = pgTable('audit_log', {
   hash: text('hash').notNull(),
 });
 
+/** What a unit settled about a caution, each time with a reason; the latest for a rule counts. Append-only. */
+export const checkSettings = pgTable(
+  'check_settings',
+  {
+    id: bigint('id', { mode: 'number' }).primaryKey().generatedAlwaysAsIdentity(),
+    unitId: uuid('unit_id')
+      .notNull()
+      .references(() => units.id),
+    rule: text('rule').notNull(),
+    setting: text('setting', { enum: ['caution', 'omission', 'off'] }).notNull(),
+    reason: text('reason').notNull(),
+    settledBy: uuid('settled_by')
+      .notNull()
+      .references(() => people.id),
+    settledAt: instant('settled_at').notNull().defaultNow(),
+  },
+  (table) => [index('check_settings_of_unit').on(table.unitId, table.rule, table.id)],
+);
+
 /** Doctors and practices that letters go to. */
 export const recipients = pgTable('recipients', {
   id: id(),

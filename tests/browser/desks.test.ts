@@ -70,6 +70,7 @@ const desks: readonly (readonly [who: string, path: string, opens: boolean])[] =
   ['auditor', '/auditing', true],
   ['administrator', '/people', false],
   ['administrator', '/unit', false],
+  ['administrator', '/unit/checks', false],
   ['auditor', '/handbook', false],
 ];
 

@@ -40,6 +40,7 @@ const places: readonly { method: string; path: () => string; action: Action }[] 
   { method: 'GET', path: () => '/recipients', action: 'recipients:read' },
   { method: 'GET', path: () => '/people', action: 'people:change' },
   { method: 'GET', path: () => '/unit', action: 'unit:change' },
+  { method: 'GET', path: () => '/unit/checks', action: 'unit:change' },
   { method: 'GET', path: () => '/handbook', action: 'handbook:read' },
   { method: 'GET', path: () => `/cases/${caseId}`, action: 'case:list-own' },
   { method: 'GET', path: () => `/api/cases/${caseId}`, action: 'case:list-own' },

@@ -285,6 +285,32 @@ describe('two processes', () => {
   });
 });
 
+describe('a caution that the unit has settled', () => {
+  it('is switched off with a reason and nothing else can be', async () => {
+    const administrator = await signInAs(server.url, 'administrator');
+    const settle = (rule: string, reason: string) =>
+      administrator.post('/unit/checks', { rule, setting: 'off', reason });
+    expect((await settle('side-differs', 'we know')).status).toBe(422);
+    expect((await settle('expansile-concentration', '')).status).toBe(422);
+    const id = await caseAt(1);
+    const record = { version: 1, tamponade: { agent: 'SF6', concentrationPercent: 24 } };
+    const save = async (revision: number) => {
+      const saved = await surgeon.send(
+        'PUT',
+        `/api/cases/${id}`,
+        { record, sheet: emptySheet, answers: [] },
+        revision,
+      );
+      const { flags } = await saved.json();
+      return flags.map(({ rule }: { rule: string }) => rule);
+    };
+    expect(await save(1)).toContain('expansile-concentration');
+    expect((await settle('expansile-concentration', 'our protocol uses 24%')).status).toBe(303);
+    expect(await save(2)).not.toContain('expansile-concentration');
+    await expect(app.query('delete from check_settings')).rejects.toMatchObject({ code: '42501' });
+  });
+});
+
 it('prints no patient data in its log', () => {
   const patient = fixture().who?.patient;
   for (const secret of ['Oakhollow', 'Quillfeather', patient?.familyName ?? 'x', patient?.number ?? 'x']) {

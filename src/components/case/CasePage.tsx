@@ -1,9 +1,10 @@
 import { QueryClient, QueryClientProvider } from '@tanstack/react-query';
 import { useCallback, useEffect, useMemo, useRef, useState } from 'react';
 import type { CaseSigned, CaseView, UnitView } from '../../domain/api.ts';
+import type { Settings } from '../../domain/checks/engine.ts';
 import { BottomBar, blockedBy } from './BottomBar.tsx';
 import { ConflictBar } from './ConflictBar.tsx';
-import { derivers } from './derive.ts';
+import { deriversFor } from './derive.ts';
 import { createDeskStore, type Pane, panes } from './desk-store.ts';
 import { KeysDialog } from './KeysDialog.tsx';
 import { Margin } from './Margin.tsx';
@@ -22,6 +23,8 @@ interface Props {
   /** Today at the unit, YYYY-MM-DD. */
   today: string;
   mayWrite: boolean;
+  /** What the unit has settled about its cautions. */
+  settings: Settings;
   signed: CaseSigned | null;
 }
 
@@ -121,7 +124,7 @@ export const CasePage = (props: Props) => {
   const { view, mayWrite } = props;
   const [signed, setSigned] = useState(props.signed);
   const [client] = useState(() => new QueryClient());
-  const [store] = useState(() => createDeskStore({ ...view, stage: 'who' }, derivers));
+  const [store] = useState(() => createDeskStore({ ...view, stage: 'who' }, deriversFor(props.settings)));
   const readOnly = !mayWrite || view.state === 'signed' || signed !== null;
   const tools: Desk = useMemo(() => ({ store, readOnly, now: localNow }), [store, readOnly]);
   return (

@@ -1,4 +1,5 @@
 import type { UnitView } from '../api.ts';
+import type { Settings } from '../checks/engine.ts';
 import type { Answer, Flag } from '../checks/flag.ts';
 import type { Sheet } from '../drafting/sheet.ts';
 import type { CaseRecord } from '../record/schema.ts';
@@ -15,6 +16,8 @@ export interface FrozenNote {
   flags: Flag[];
   answers: Answer[];
   unit: UnitView;
+  /** What the unit had settled about its cautions. */
+  settings: Settings;
   versions: { record: number; templates: string; rules: string };
   signature: {
     /** Printed name, title and meaning, as in every readable form. */

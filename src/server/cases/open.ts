@@ -1,9 +1,11 @@
 import type { Database } from '../../db/client.ts';
 import { may } from '../../domain/access/policy.ts';
 import type { CaseSigned, CaseView } from '../../domain/api.ts';
+import type { Settings } from '../../domain/checks/engine.ts';
 import { actorOf, type Visit } from '../accounts/visit.ts';
 import { appendAudit } from '../audit/log.ts';
 import { localDay } from '../local-day.ts';
+import { settingsOf } from '../practice/check-settings.ts';
 import { readSigned, signedOf } from '../signing/signed-version.ts';
 import { loadCase, viewOf } from './load.ts';
 
@@ -12,6 +14,8 @@ export interface OpenedCase {
   signed: CaseSigned | null;
   /** Today at the unit, YYYY-MM-DD. */
   today: string;
+  /** What the unit has settled about its cautions. */
+  settings: Settings;
 }
 
 const UUID = /^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/;
@@ -26,11 +30,17 @@ export const openCase = async (db: Database, visit: Visit, id: string): Promise<
   const today = localDay();
   const { roles } = visit.person;
   if (row.state === 'draft') {
-    return may(roles, 'case:read-draft', row.state) ? { view: viewOf(row), signed: null, today } : undefined;
+    if (!may(roles, 'case:read-draft', row.state)) return undefined;
+    return { view: viewOf(row), signed: null, today, settings: await settingsOf(db, visit.unit.id) };
   }
   const found = await readSigned(db, visit.unit.id, { caseId: id });
   if (found === undefined || !may(roles, 'signed:read', row.state)) return undefined;
   await db.transaction((tx) => appendAudit(tx, actorOf(visit), 'note:read', found.row.id));
   const { record, sheet, answers } = found.note;
-  return { view: { ...viewOf(row), record, sheet, answers }, signed: signedOf(found.row), today };
+  return {
+    view: { ...viewOf(row), record, sheet, answers },
+    signed: signedOf(found.row),
+    today,
+    settings: found.note.settings,
+  };
 };

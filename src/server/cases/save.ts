@@ -7,6 +7,7 @@ import { ok, type Result } from '../../domain/result.ts';
 import { actorOf, type Visit } from '../accounts/visit.ts';
 import { appendAudit } from '../audit/log.ts';
 import { database } from '../database.ts';
+import { settingsOf } from '../practice/check-settings.ts';
 import { lockRevision } from './revision.ts';
 
 /** An answer that says the same as before keeps who gave it and when. */
@@ -43,7 +44,7 @@ export const saveCase = (
     return ok({
       revision: next.revision,
       savedAt: savedAt.toISOString(),
-      flags: checkCase(record, sheet),
+      flags: checkCase(record, sheet, await settingsOf(tx, unit.id)),
       answers: stamped,
     });
   });

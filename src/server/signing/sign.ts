@@ -19,6 +19,7 @@ import { lockRevision } from '../cases/revision.ts';
 import { database } from '../database.ts';
 import { noteDocx } from '../documents/note-docx.ts';
 import { draftLettersOf } from '../letters/on-signed.ts';
+import { settingsOf } from '../practice/check-settings.ts';
 
 export const sha256 = (content: string | Uint8Array): string =>
   createHash('sha256').update(content).digest('hex');
@@ -46,7 +47,8 @@ export const signCase = async (
     if (!locked.ok) return locked;
     const { record, answers } = locked.value;
     const sheet = mergeSheet(locked.value.sheet, draftNote(record));
-    const flags = checkCase(record, sheet);
+    const settings = await settingsOf(tx, unit.id);
+    const flags = checkCase(record, sheet, settings);
     const inTheWay = blocking(flags, answers);
     if (inTheWay.length > 0) {
       const message = 'Some flags stand in the way of the signature.';
@@ -63,6 +65,7 @@ export const signCase = async (
       flags,
       answers,
       unit: unitView,
+      settings,
       versions: { record: RECORD_VERSION, templates: TEMPLATES_VERSION, rules: RULES_VERSION },
       signature: {
         name: person.name,

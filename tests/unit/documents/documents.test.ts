@@ -34,6 +34,7 @@ const noteOf = (familyName: string): FrozenNote => {
     flags: [],
     answers: [],
     unit,
+    settings: {},
     versions: { record: 1, templates: 'x', rules: 'y' },
     signature: {
       name: 'A. Surgeon',
