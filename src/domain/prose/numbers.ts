@@ -1,30 +1,36 @@
-const words = [
-  'zero',
-  'one',
-  'two',
-  'three',
-  'four',
-  'five',
-  'six',
-  'seven',
-  'eight',
-  'nine',
-  'ten',
-  'eleven',
-  'twelve',
-] as const;
+const words: Readonly<Record<string, number>> = {
+  one: 1,
+  two: 2,
+  three: 3,
+  four: 4,
+  five: 5,
+  six: 6,
+  seven: 7,
+  eight: 8,
+  nine: 9,
+  ten: 10,
+  eleven: 11,
+  twelve: 12,
+  thirteen: 13,
+  fourteen: 14,
+  fifteen: 15,
+  sixteen: 16,
+  eighteen: 18,
+  twenty: 20,
+  thirty: 30,
+  forty: 40,
+  fifty: 50,
+  sixty: 60,
+};
 
 /** Pattern of a number in figures, decimal point or comma. */
 export const FIGURE = String.raw`\d+(?:[.,]\d+)?`;
 
-/** Pattern of a number in figures or, up to twelve, in words. */
-export const NUMBER = `(?:${FIGURE}|${words.slice(1).join('|')})`;
+/** Pattern of a number in figures or, the usual ones, in words. */
+export const NUMBER = `(?:${FIGURE}|${Object.keys(words).reverse().join('|')})`;
 
 /** Value of what `NUMBER` matches. */
-export const numberOf = (written: string): number => {
-  const index = (words as readonly string[]).indexOf(written);
-  return index >= 0 ? index : Number(written.replace(',', '.'));
-};
+export const numberOf = (written: string): number => words[written] ?? Number(written.replace(',', '.'));
 
 /** Equal as written: 5 and 5.0 are, 5 and 5.5 are not. */
 export const sameNumber = (a: number, b: number): boolean => Math.abs(a - b) < 0.005;

@@ -70,6 +70,13 @@ const retinotomy = (kinds: readonly string[]) => (record: CaseRecord) => {
 /** What a text can say was done or not done, found or not found. */
 export const claims: readonly Claim[] = [
   claim(
+    /\b(?:tears?|holes?|breaks?) (?:was|were) (?:left )?untreated\b/g,
+    'retinopexy.treatments',
+    'retinopexy',
+    ({ retinopexy }) => some(retinopexy?.treatments),
+    { negative: true },
+  ),
+  claim(
     /\b(?:external(?:ly)? drain(?:age|ed)|drain(?:ed|age)(?: \w+){0,2} external(?:ly)?|edsrf)\b/g,
     'drainage.kind',
     'external drainage',
@@ -97,15 +104,18 @@ export const claims: readonly Claim[] = [
     drainageKind(['external', 'internal', 'both']),
     { negative: true },
   ),
-  claim(/\b(?:cryo(?:therapy|pexy|retinopexy)?)\b/g, 'retinopexy.treatments', 'cryotherapy', (record) =>
-    hasModality(record, ['cryo']),
+  claim(
+    /\b(?:cryo(?:therapy|pexy|retinopexy)?|froze|frozen|freez\w+)\b/g,
+    'retinopexy.treatments',
+    'cryotherapy',
+    (record) => hasModality(record, ['cryo']),
   ),
   claim(
     /\b(?:endo-?laser|laser retinopexy|lasered|indirect laser|laser(?! (?:scars?|only|was enough|in))(?= (?:was|to|applied|round|around|needed)|[.,;]|$))\b/g,
     'retinopexy.treatments',
     'laser',
     (record) => hasModality(record, lasers),
-    { unless: /\b(?:more laser|lattice)\b/ },
+    { unless: /\b(?:more laser|lattice|assistants?|who (?:indented|assisted|held))\b/ },
   ),
   claim(/\bretinopexy\b(?<!pneumatic retinopexy)/g, 'retinopexy.treatments', 'retinopexy', ({ retinopexy }) =>
     some(retinopexy?.treatments),
@@ -126,7 +136,7 @@ export const claims: readonly Claim[] = [
     some(endOfCase?.complications),
   ),
   claim(
-    /\buncomplicated\b/g,
+    /\b(?:uncomplicated|uneventful(?:ly)?)\b/g,
     'endOfCase.complications',
     'complications',
     ({ endOfCase }) => some(endOfCase?.complications),
@@ -247,7 +257,7 @@ export const claims: readonly Claim[] = [
     ({ vitreous }) => among(vitreous?.membranesPeeled, 'ilm'),
   ),
   claim(
-    /\b(?:membranes?|erm) (?:was |were )?(?:not )?peeled\b|\bmembrane peel\w*/g,
+    /\b(?:membranes?|erm) (?:was |were )?(?:not )?peeled\b|\bmembrane peel\w*|(?<!ilm )\bpeel(?:ing)?\b/g,
     'vitreous.membranesPeeled',
     'membrane peel',
     ({ vitreous }) =>
@@ -272,13 +282,13 @@ export const claims: readonly Claim[] = [
         : ['left', 'not-removed'].includes(vitreous.heavyLiquid),
   ),
   claim(
-    /\b(?:relaxing )?retinectomy\b(?! edge)/g,
+    /\b(?<!retinotomy or )(?:relaxing )?retinectomy\b(?! edge)/g,
     'vitreous.retinotomies',
     'retinectomy',
     retinotomy(['retinectomy', 'relaxing']),
   ),
   claim(
-    /\bretinotomy\b/g,
+    /\bretinotomy\b(?! or)/g,
     'vitreous.retinotomies',
     'retinotomy',
     retinotomy(['retinectomy', 'relaxing', 'drainage']),
@@ -319,14 +329,14 @@ export const claims: readonly Claim[] = [
     ({ buckle }) => (buckle?.peritomy === undefined ? undefined : buckle.peritomy === 'full-circle'),
   ),
   claim(
-    /\b(?:subretinal fluid|srf|fluid) (?:was |is |has been )?(?:left|remain\w*|persist\w*)\b|\bresidual (?:srf|subretinal fluid)\b/g,
+    /\b(?:subretinal fluid|srf|fluid) (?:was |is |has been )?(?:left(?! undrained| alone)|remain\w*|persist\w*)\b|\bresidual (?:srf|subretinal fluid)\b/g,
     'endOfCase.retina',
     'fluid left',
     ({ endOfCase }) => (endOfCase?.retina === undefined ? undefined : endOfCase.retina !== 'flat'),
     { unless: /\buntil\b|\bno residual fluid\b/ },
   ),
   claim(
-    /\bretina (?:was |is )?(?:now )?(?:completely |fully |totally |entirely )?flat\b(?= at the end|$|[.,;])/g,
+    /\bretina (?:was |is )?(?:now |not )?(?:completely |fully |totally |entirely )?flat\b(?= at the end|$|[.,;])/g,
     'endOfCase.retina',
     'flat retina',
     ({ endOfCase }) => (endOfCase?.retina === undefined ? undefined : endOfCase.retina === 'flat'),

@@ -22,7 +22,7 @@ const unit = String.raw`(?: ?-?o ?'? ?clock| ?o[/.]?c\b\.?| ?h(?:rs?|ours?)?\b(?
 const joiner = String.raw`\s*(?:,? and|&|,|-|to|till|until|through|round to)\s*(?:at |a \w+ (?:hole|tear) at )?`;
 const bare = String.raw`(?![\w%/]|[.,]\d| ?(?:mm|ml|mg|%|x|days?|weeks?|months?|nights?|minutes|min|quadrants?|breaks?|tears?|holes?|rows?|g|gauge|ports?|clock|times?|am|pm|times|spots|burns|applications)\b)`;
 const sequence = new RegExp(
-  `(?<![\\w:.,/-]|@\\d)(${hour})(?:${unit}|${bare})?(?:${joiner}(${hour})(?:${unit}|${bare}))*`,
+  `(?<![\\w:.,/-])(${hour})(?:${unit}|${bare})?(?:${joiner}(${hour})(?:${unit}|${bare}))*`,
   'g',
 );
 const oneHour = new RegExp(`${hour}`, 'g');
@@ -55,7 +55,7 @@ const topics: Topics<
   ['detachment', /\b(?:detach(?:ed|ment)|rr?d|subretinal fluid (?!was)|srf(?! (?:was|drain)))\b/g],
   [
     'drainage',
-    /\b(?:(?:externally |fluid |srf )?drain(?:ed|age)?(?! through)|edsrf|cut-?down|choroidotomy|let out)\b/g,
+    /\b(?:(?:externally |fluid |srf )?drain(?:ed|age)?(?! through)|edsrf|cut-?down|choroidotomy|let out|released)\b/g,
   ],
   ['lattice', /\blattice\b/g],
   ['element', /\b(?:tyre|sponge|segment|explant)\b/g],
@@ -103,8 +103,10 @@ const placesIn = (plain: string): Place[] =>
       return [
         { index: match.index, length: words.trimEnd().length, from: hourOf(first[0]), to: hourOf(second[0]) },
       ];
-    return found.map((one, at) => {
-      const end = at === found.length - 1 ? words.trimEnd().length : one.index + one[0].length;
+    // "Over break 1, 8 o'clock": the first figure numbers the break.
+    const numbered = /\b(?:break|element) $/.test(before) && /^\d,/.test(words) ? 1 : 0;
+    return found.slice(numbered).map((one, at, list) => {
+      const end = at === list.length - 1 ? words.trimEnd().length : one.index + one[0].length;
       return {
         index: match.index + one.index,
         length: end - one.index,

@@ -3,7 +3,7 @@ import { deny, type Reader, spanOf } from '../finding.ts';
 import { NUMBER, negatedAt, numberOf } from '../numbers.ts';
 
 const breakCount = new RegExp(
-  `(?<![\\w.,:/-])(${NUMBER}|a (?:single|solitary)|single|multiple|several|both|no) (?:(?:retinal|small|large|horseshoe|round|atrophic|operculated|peripheral|further|separate|treated|flat) )*(tears?|holes?|breaks?|hsts?|rhs?)\\b`,
+  `(?<![\\w.,:/-])(${NUMBER}|a (?:single|solitary)|single|a pair of|a couple of|multiple|several|both|no) (?:(?:retinal|small|large|horseshoe|round|atrophic|operculated|peripheral|further|separate|treated|flat) )*(tears?|holes?|breaks?|hsts?|rhs?)\\b`,
   'g',
 );
 
@@ -43,7 +43,7 @@ const readBreakCount: Reader = (clause, record) => {
         );
       if (how === 'both') return total !== 2 && list.length !== 2;
       if (how === 'multiple' || how === 'several') return total < 2;
-      const counted = /single|solitary/.test(how) ? 1 : numberOf(how);
+      const counted = /single|solitary/.test(how) ? 1 : /pair|couple/.test(how) ? 2 : numberOf(how);
       return counted === 1 && placed ? false : counted !== total && !(counted < list.length && placed);
     })
     .map((match) =>

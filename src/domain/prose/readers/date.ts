@@ -23,7 +23,7 @@ const dates = new RegExp(
     `\\b(\\d{1,2})(?:st|nd|rd|th)?(?: of)? (${month})(?:,? (\\d{4}))?`,
     `\\b(${month}) (\\d{1,2})(?:st|nd|rd|th)?\\b(?:,? (\\d{4})\\b)?`,
     '\\b(\\d{4})-(\\d{2})-(\\d{2})\\b',
-    '(?<![\\d./-])(\\d{1,2})[./](\\d{1,2})[./](\\d{4}|\\d{2})(?![\\d/])',
+    '(?<![\\d./-])(\\d{1,2})[./-](\\d{1,2})[./-](\\d{4}|\\d{2})(?![\\d/])',
     `\\b(?:in|of|since) (?:(${month}) )?((?:19|20)\\d\\d)\\b`,
   ].join('|'),
   'g',
@@ -84,7 +84,7 @@ type Topic =
   | 'other';
 
 const topics: Topics<Topic> = [
-  ['birth', /\b(?:born|birth|dob)\b/g],
+  ['birth', /\b(?:born|birth|dob|d\.o\.b)\b/g],
   [
     'review',
     /\b(?:review(?:ed)?|seen again|appointment|follow-?up|come back|return|(?:see|be seen|seen) (?:her|him|them|you|in (?:the )?clinic|again))\b/g,
@@ -98,7 +98,7 @@ const topics: Topics<Topic> = [
   ['laser', /\blaser\b/g],
   [
     'operation',
-    /\b(?:(?<!cataract )(?:operat(?:ed|ion)|surgery)|underwent|procedure|performed|repaired|treated|buckle|(?<!(?:first|previous|prior) )(?:vitrectomy|ppv)|pneumatic)\b/g,
+    /\b(?:(?<!cataract )(?:operat(?:ed|ion)|surgery)|underwent|procedure|performed|repaired|treated|buckle|(?<!(?:first|previous|prior) )(?:vitrectomy|ppv)|pneumatic|(?:oil|gas|sf6|c3f8|c2f6)(?= (?:put in )?on)|op)\b/g,
   ],
   [
     'other',

@@ -59,7 +59,10 @@ const topics: Topics<Topic> = [
     'review',
     /\b(?:review(?:ed)?|seen(?: again)?|appointment|clinic|follow-?up|come back|return|see (?:her|him|them|you))\b/g,
   ],
-  ['oil', /\b(?:oil (?:to|will|should|is to) (?:come|be)|removal of (?:silicone )?oil|oil removal|roso)\b/g],
+  [
+    'oil',
+    /\b(?:oil (?:to|will|should|is to) (?:come|be)|removal of (?:silicone )?oil|oil removal|roso|oil out)\b/g,
+  ],
   ['element', /\b(?:band|element|buckle) (?:to|will|should) (?:come|be (?:removed|released|cut))\b/g],
   ['macula', /\b(?:macula|mac|fovea)\w*[- :]+(?:(?:was|is|had|been|has) )*(?:off|detached)\b/g],
   [

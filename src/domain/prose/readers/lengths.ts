@@ -148,7 +148,7 @@ export const readMeasures: Reader = (clause, record) => {
   for (const match of plain.matchAll(figures)) {
     const end = match.index + match[0].length;
     const [whole, first, second, axial] = match;
-    if (negatedAt(plain, match.index)) continue;
+    if (negatedAt(plain, match.index) || /^ long\b/.test(plain.slice(end))) continue;
     if (axial !== undefined) {
       const value = record.before?.axialLengthMm;
       if (value !== undefined && !sameNumber(value, numberOf(axial)))
@@ -174,7 +174,8 @@ export const readMeasures: Reader = (clause, record) => {
     const tail = measure?.after?.exec(after);
     const noun = nounAfter.exec(after) ?? nounBefore.exec(before);
     // "4 mm from the limbus": ports, when the clause is not about a break, an element or an injection.
-    const ports = limbus && !/\b(?:tear|hole|break|edge|band|sponge|inject)/.test(before);
+    const ports =
+      limbus && !/\b(?:tear|hole|break|dialysis|edge|band|sponge|inject|hst|retinotomy)/.test(plain);
     const [values, field, unit] =
       measure !== undefined && !(limbus && measure.field !== 'vitreous.sclerotomiesMm')
         ? [measure.values(record), measure.field, measure.unit]

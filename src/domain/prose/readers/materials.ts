@@ -108,7 +108,7 @@ const families: readonly Family[] = [
     recorded: (record) => defined(closuresOf(record).map(({ kind }) => kind)),
     field: 'buckle.elements.0.closure.kind',
     within: /\b(?:ends|joined|sleeve|clip\w*)\b/,
-    unless: /\b(?:drape|turned|buried|throws?|traction|mattress)\b/,
+    unless: /\b(?:drape|paper|turned|buried|throws?|traction|mattress)\b/,
   },
   {
     things: [
@@ -137,7 +137,7 @@ const families: readonly Family[] = [
   },
 ];
 
-const viscosity = /(?<![\d.,])(\d{1,2}[,. ]?\d{3}|\d{3}) ?(?:c(?:st|s)|centistokes?)\b/g;
+const viscosity = /(?<![\d.,])(\d{1,2}[,. ]?\d{3}|\d{3})[ -]?(?:c(?:st|s)|centistokes?)\b/g;
 
 const readViscosity: Reader = (clause, { tamponade }) => {
   const recorded = tamponade?.viscosityCentistokes;

@@ -41,7 +41,7 @@ const hourly: Readonly<Record<string, number>> = {
 };
 
 const frequency =
-  /\b(?:(once|twice|thrice) ?(?:a|per)? ?(?:day|daily)|(two|three|four|five|six|eight|ten|twelve|\d{1,2}) ?(?:times|x) ?(?:a |per |\/ ?)?(?:day|daily)|(\d{1,2})(?: ?x ?\/| ?\/) ?day|(od|bd|bid|tds|tid|qds|qid|nocte|mane)\b|(o\.d\.|b\.d\.|t\.d\.s\.|q\.d\.s\.|b\.i\.d\.|t\.i\.d\.|q\.i\.d\.)|every (\d{1,2}|two|three|four|six|eight|twelve) hours|(every hour|hourly)|(two|three|four|\d)[- ]hourly|(daily|at night|every (?:day|morning|night)))/g;
+  /\b(?:(once|twice|thrice) ?(?:a|per)? ?(?:day|daily)|(two|three|four|five|six|eight|ten|twelve|\d{1,2}) ?(?:times|x) ?(?:a |per |\/ ?)?(?:day|daily)|(?:x ?)?(\d{1,2})(?: ?x ?\/| ?\/| ) ?(?:day|daily)|(od|bd|bid|tds|tid|qds|qid|nocte|mane)\b|(o\.d\.|b\.d\.|t\.d\.s\.|q\.d\.s\.|b\.i\.d\.|t\.i\.d\.|q\.i\.d\.)|every (\d{1,2}|two|three|four|six|eight|twelve) hours|(every hour|hourly)|(two|three|four|\d)[- ]hourly|(daily|at night|every (?:day|morning|night)))/g;
 
 const timesOf = (match: RegExpMatchArray): number | undefined => {
   const [, adverb, times, slash, short, dotted, every, hour, spaced, daily] = match;

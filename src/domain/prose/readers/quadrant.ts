@@ -57,7 +57,7 @@ const topics: Topics<'breaks' | 'closure' | 'iridectomy' | 'retinotomy' | 'eleme
   ['element', /\b(?:sponge|segment|tyre)\b/g],
   [
     'other',
-    /\b(?:ports?|sclerotom\w*|infusion|chandelier|block|conjunctiva\w*|cut|vortex|arcade|iris|lattice|retina|fluid|detachment|rr?d|injected|gas|scars?|laser in|oxygen|membranes?|suture[sd]?|tunnels?|loops?|shaved|vitreous|quadrants? (?:was|were) flat|sub-tenon\w*)\b/g,
+    /\b(?:ports?|sclerotom\w*|infusion|chandelier|block|conjunctiva\w*|cut|vortex|arcade|iris|lattice|pigment\w*|fluid|detachment|rr?d|injected|gas|scars?|laser in|oxygen|membranes?|suture[sd]?|tunnels?|loops?|shaved|vitreous|quadrants? (?:was|were) flat|sub-tenon\w*)\b/g,
   ],
 ];
 
@@ -120,7 +120,11 @@ export const readQuadrants: Reader = (clause, record) => {
       const end = match.index + match[0].length;
       // "IT" and "IN" are capitals; in lower case they are words of their own.
       if (isShort.test(match[0]) && clause.text.slice(match.index, end) !== match[0].toUpperCase()) continue;
-      if (negatedAt(plain, match.index)) continue;
+      if (
+        negatedAt(plain, match.index) ||
+        /^ retina (?:was|is|looked) (?:flat|free|normal|without)/.test(plain.slice(end))
+      )
+        continue;
       const before = topicBefore(plain, match.index, topics);
       const after = topicAfter(plain, end, topics);
       // An adjective belongs to what follows closely, an adverb to what came before.

@@ -4,7 +4,7 @@ import { deny, type ProseFinding, type Reader } from '../finding.ts';
 
 /** What is one of a pair: the word before it names a side, where "left in the eye" and "right angles" do not. */
 const ofAnEye =
-  '(?:-| )?(?:sided )?(?:upper |lower |posterior |anterior |macula[- ](?:off|on|split|involving|sparing) |rhegmatogenous |tractional |recurrent |total |subtotal |inferior |superior |giant |3-port |three-port |local |facial |23|25|27|20)?-?(?:gauge )?(?:g )?(?:eye|globe|fundus|retinal?|macula|vitreous|vitrectomy|pars plana|ppv|scleral?|buckle|buckling|encircling|encirclement|pneumatic|cryo(?:therapy|pexy)?|phaco\\w*|cataract|cornea|pupil|iris|lens|orbit|conjunctiva|rr?d|detachment|retinopexy|gas|oil|tamponade|band|eb|sb|optic|disc|iol|intraocular|sub-?tenon\\S*|peribulbar|retrobulbar|block|giant|grt|dialysis|tear|break|hole|membrane|silicone|endolaser|laser|amaurosis|axial)\\b';
+  '(?:-| )?(?:sided )?(?:upper |lower |posterior |anterior |macula[- ](?:off|on|split|involving|sparing) |rhegmatogenous |tractional |recurrent |total |subtotal |inferior |superior |giant |3-port |three-port |local |facial |(?:supero|infero)-?(?:temporal|nasal) |upper |lower |bullous |shallow |primary |23|25|27|20)?-?(?:gauge )?(?:g )?(?:eye|globe|fundus|retinal?|macula|vitreous|vitrectomy|pars plana|ppv|scleral?|buckle|buckling|encircling|encirclement|pneumatic|cryo(?:therapy|pexy)?|phaco\\w*|cataract|cornea|pupil|iris|lens|orbit|conjunctiva|rr?d|detachment|retinopexy|gas|oil|tamponade|band|eb|sb|optic|disc|iol|intraocular|sub-?tenon\\S*|peribulbar|retrobulbar|block|giant|grt|dialysis|tear|break|hole|membrane|silicone|endolaser|laser|amaurosis|axial|(?:eye)?lids?)\\b';
 
 interface SideWords {
   pattern: RegExp;
@@ -17,7 +17,7 @@ const patterns: readonly SideWords[] = [
   // "surgery to the left", "of the right": at the end of what is said, never "to the left side" or "left lateral".
   {
     pattern:
-      /\b(?:on|in|of|to) the (right|left)(?=\s*(?:[,.;:)]|$|was|were|under|with|for|showed|and (?:no|a)\b))/g,
+      /\b(?:on|in|of|to) the (right|left)(?=\s*(?:[,.;:)]|$|was|were|under|with|for|showed|went|is|has|and (?:no|a)\b))/g,
   },
   { pattern: /\b(re|le|od|os)\b(?![-'])/g, capitals: true },
   { pattern: /(?<![\w/.-])(rt|lt)\.?(?= |:|$)/g, capitals: true },
@@ -69,7 +69,7 @@ const ofTheOperation =
 
 /** What is said of an eye that is not operated on. */
 const ofTheOther =
-  /\b(?:flat|good|healthy|normal|lazy|amblyop\w+|lattice|scars?|old|drusen|nuclear|ns cataract|mild|no (?:new |other )?(?:break|tear|hole)s?|without (?:a )?breaks?|pvd only|va|iop|sees? well|6\/\d+|phakic|pseudophakic|aphakic|cataract|as well|too|also|prophylactic|is on|next|will|had laser|attend|symptoms?|patched|axial)\b/;
+  /\b(?:flat|good|healthy|normal|free of|searched|lazy|amblyop\w+|lattice|scars?|old|drusen|nuclear|ns cataract|mild|no (?:new |other )?(?:break|tear|hole)s?|without (?:a )?breaks?|pvd only|va|iop|sees? well|6\/\d+|phakic|pseudophakic|aphakic|cataract|as well|too|also|prophylactic|is on|next|will|had laser|attend|symptoms?|patched|axial)\b/;
 
 const planned = /\b(?:planned|offered|next (?:year|visit|month)|prophylactic|as well|should not)\b/;
 

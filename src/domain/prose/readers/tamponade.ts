@@ -1,5 +1,5 @@
 import { deny, type ProseFinding, type Reader, spanOf } from '../finding.ts';
-import { FIGURE, negatedAfter, negatedAt, numberOf, sameNumber } from '../numbers.ts';
+import { NUMBER, negatedAfter, negatedAt, numberOf, sameNumber } from '../numbers.ts';
 
 const names: readonly { agent: string; words: string }[] = [
   { agent: 'SF6', words: 'sf-?6|sulphur hexafluoride|sulfur hexafluoride' },
@@ -22,11 +22,11 @@ const allNames = names.map(({ words }) => words).join('|');
 const anyAgent = new RegExp(`(?<![\\w])(?:${allNames})(?![\\w-])`, 'g');
 const agentOf = (words: string) => names.find((name) => new RegExp(`^(?:${name.words})$`).test(words))?.agent;
 const percentBefore = new RegExp(
-  `(${FIGURE}) ?(?:%|per ?cent)(?: (?:of|isoexpansile|mixture of))? (?:${allNames})(?![\\w])`,
+  `(${NUMBER})[- ]?(?:%|per ?cent)(?: (?:of|isoexpansile|mixture of))? (?:${allNames})(?![\\w])`,
   'g',
 );
 const percentAfter = new RegExp(
-  `(?:${allNames})(?:,| gas)?(?: at a concentration of| at| of| mixture of| mixed to| to| diluted to| in a concentration of| -)? ?(?:\\((?:[a-z-]+, ?)?)?(${FIGURE}) ?(?:%|per ?cent)(?! (?:of|fill))`,
+  `(?:${allNames})(?:,| gas)?(?: at a concentration of| mix(?:ture)? of| at| of| mixture of| mixed to| to| diluted to| in a concentration of| -)? ?(?:\\((?:[a-z-]+, ?)?)?(${NUMBER})[- ]?(?:%|per ?cent)(?! (?:of|fill))`,
   'g',
 );
 
@@ -95,7 +95,7 @@ const readMixing: Reader = (clause, { tamponade }) => {
 };
 
 const gasPutIn =
-  /\b(?:(?:filled|full|left|exchanged|exchange) (?:with|of|for) gas|air[- ]gas|gas (?:tamponade|bubble|fill)|(?:long|short)-acting gas)\b/g;
+  /\b(?:(?:filled|full|left|exchanged|exchange) (?:with|of|for) gas|air[- ]gas|gas (?:tamponade|bubble|fill)|gas (?:was|were) (?:given|put in|injected|used|instilled)|(?:long|short)-acting gas)\b/g;
 
 /** Gas without its name, in an eye that holds none. */
 const readGas: Reader = (clause, { tamponade }) => {
