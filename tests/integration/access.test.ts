@@ -43,6 +43,7 @@ const places: readonly { method: string; path: () => string; action: Action }[] 
   { method: 'GET', path: () => '/unit/checks', action: 'unit:change' },
   { method: 'GET', path: () => '/handbook', action: 'handbook:read' },
   { method: 'GET', path: () => `/cases/${caseId}`, action: 'case:list-own' },
+  { method: 'GET', path: () => `/cases/${caseId}/history`, action: 'case:list-own' },
   { method: 'GET', path: () => `/api/cases/${caseId}`, action: 'case:list-own' },
   { method: 'PUT', path: () => `/api/cases/${caseId}`, action: 'case:write' },
   { method: 'POST', path: () => `/api/cases/${caseId}/sign`, action: 'case:sign' },

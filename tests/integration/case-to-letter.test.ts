@@ -85,6 +85,13 @@ describe('saving', () => {
     expect(rows[0].kept).toBe(2);
   });
 
+  it('shows who changed what between two revisions', async () => {
+    const id = await caseAt(5);
+    const page = await (await surgeon.get(`/cases/${id}/history`)).text();
+    expect(page).toContain('A. Surgeon');
+    expect(page).toMatch(/Theatre<\/td>[\s\S]*<del>nothing<\/del>[\s\S]*<ins>(?:One|Two)<\/ins>/);
+  });
+
   it('says where a record does not fit, and asks for the revision', async () => {
     const id = await caseAt(4);
     const wrong = { record: { version: 1, who: { eye: 'both' } }, sheet: emptySheet, answers: [] };

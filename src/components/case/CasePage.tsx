@@ -91,7 +91,13 @@ const CaseDesk = ({ view, unit, today, signed, onSigned }: DeskProps) => {
 
   return (
     <div className="case-page" data-pane={pane}>
-      <PatientBar revision={autosave.revision} save={autosave.state} today={today} signed={signed !== null} />
+      <PatientBar
+        revision={autosave.revision}
+        save={autosave.state}
+        today={today}
+        signed={signed !== null}
+        history={`/cases/${view.id}/history`}
+      />
       <ConflictBar autosave={autosave} />
       {signed !== null && <SignedBar signed={signed} />}
       <PaneTabs />

@@ -29,10 +29,12 @@ interface Props {
   /** Today, YYYY-MM-DD, for the age of a patient whose operation has no date yet. */
   today: string;
   signed: boolean;
+  /** Where the revisions of this case are compared. */
+  history: string;
 }
 
 /** Who lies there, which eye, and how the record stands. Always in view. */
-export const PatientBar = ({ revision, save, today, signed }: Props) => {
+export const PatientBar = ({ revision, save, today, signed, history }: Props) => {
   const who = useDesk((state) => state.record.who);
   const patient = who?.patient;
   const name = [patient?.familyName, patient?.givenName].filter((part) => part !== undefined).join(', ');
@@ -53,7 +55,10 @@ export const PatientBar = ({ revision, save, today, signed }: Props) => {
         {operationInWords(who)}
       </span>
       <span className="patient-save" data-save={save.kind} suppressHydrationWarning>
-        {signed ? 'Signed' : `Draft, revision ${revision} · ${saveInWords(save)}`}
+        {signed ? 'Signed' : `Draft, revision ${revision} · ${saveInWords(save)}`}{' '}
+        <a href={history} className="no-print">
+          history
+        </a>
       </span>
     </header>
   );

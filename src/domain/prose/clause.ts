@@ -51,7 +51,7 @@ const elsewhere: readonly RegExp[] = [
   /\b(?:if|unless|should (?:the|it|there|any|he|she|they|a|pressure|re|cataract)|were the|had the|in case|in the event|would|could|might|may(?! (?:19|20)\d\d)|risk of|possib(?:le|ly|ility)|in theory|otherwise)\b/,
   /\b(?:consider(?:ed|ing)?|discussed|option|alternative|rather than|instead of|as opposed to|planned (?:but|initially)|initially planned|original plan|was planned|had planned|intended|thought (?:too|about)|at hand|out of stock|not available|kept for|offered|trolley|put back)\b/,
   /\b(?:often|usually|(?:is|are) (?:the )?usual|generally|in general|tends? to|gives?|more likely|can (?:follow|stay)|known risk|formation)\b/,
-  /\b(?:planned|scheduled|listed) (?:for|elsewhere)|\bis planned\b|\b(?:will|to) be (?:needed|considered|required|tried|thought)\b|\bthereafter\b|\bwe may\b/,
+  /\b(?:planned|scheduled|listed) (?:for|elsewhere)|\b(?:will|to) be (?:needed|considered|required|tried|thought)\b|\bthereafter\b|\bwe may\b/,
   /\b(?:referral|letter|referrer|referred|optometrist|patient|she|he|they) (?:\w+ )?(?:states?|said|says|reported|reports|described|describes|wrote|thought|mentioned|believed|suggested)\b/,
   /\b(?:according to|quoted?|reportedly|labelled|literature|textbook|studies|published|guidelines?|told (?:of|about)|heard of)\b/,
 ];

@@ -43,6 +43,6 @@ export const negatedAt = (plain: string, index: number): boolean =>
 
 /** Whether the words right after a place negate it: "drainage was not performed", "buckle: none". */
 export const negatedAfter = (plain: string, end: number): boolean =>
-  /^(?:\s+[\w-]+){0,2}?(?:\s+(?:was|were|is|are|has been|had been))?\s*(?:not (?:been )?(?:\w+)|none|unnecessary|omitted|avoided|deferred|nil)\b|^\s*[:-]\s*(?:none|no|nil)\b/.test(
+  /^(?:\s+[\w-]+){0,2}?(?:\s+(?:was|were|is|are|has been|had been))?\s*(?:not (?:been )?(?:\w+)|none|absent|unnecessary|omitted|avoided|deferred|nil)\b|^\s*[:-]\s*(?:none|no|nil)\b/.test(
     plain.slice(end, end + 60),
   );

@@ -98,7 +98,14 @@ export const claims: readonly Claim[] = [
     unless: /\b(?:difficulty|further|drainage with|without (?:haemorrhage|hemorrhage))\b/,
   },
   claim(
-    /\b(?:non-?drainage|undrained)\b/g,
+    /\b(?:drainage retinotomy|retinotomy (?:\w+ ){0,2}(?:for|to) drain\w*|drained (?:through|via) (?:a|the) retinotomy)\b/g,
+    'drainage.internalThrough',
+    'drainage retinotomy',
+    ({ drainage }) =>
+      drainage?.internalThrough === undefined ? undefined : drainage.internalThrough === 'retinotomy',
+  ),
+  claim(
+    /\b(?:non-?drain(?:age|ing)?|undrained)\b/g,
     'drainage.kind',
     'drainage',
     drainageKind(['external', 'internal', 'both']),

@@ -32,7 +32,10 @@ const readBreakCount: Reader = (clause, record) => {
         : ofKind.length;
       const after = clause.plain.slice(match.index + words.length);
       // One of several is still "one tear at 2 o'clock".
-      const placed = /^\s*(?:at|in|near|supero|infero|was|lay|on|st\b|sn\b|it\b)/.test(after);
+      const placed =
+        /^\s*(?:at|in|near|supero|infero|was(?! (?:found|seen|identified|present)\b(?! (?:at|in)))|lay|on|st\b|sn\b|it\b)/.test(
+          after,
+        );
       if (how === 'no')
         return (
           list.length > 0 &&
@@ -101,7 +104,10 @@ const counted: readonly Counted[] = [
     unit: 'rows',
   },
   {
-    words: new RegExp(`${n} (?:laser )?(?:applications?|spots|burns|shots|freezes)\\b`, 'g'),
+    words: new RegExp(
+      `${n} (?:laser )?(?:applications?|spots|burns|shots|freezes)\\b|\\b(?:applications|spots|burns|shots) ?[:=x] ?(${NUMBER})\\b`,
+      'g',
+    ),
     values: (record) => treatments(record).map(({ applications }) => applications),
     field: 'retinopexy.treatments',
     unit: 'applications',

@@ -87,7 +87,7 @@ const topics: Topics<Topic> = [
   ['birth', /\b(?:born|birth|dob|d\.o\.b)\b/g],
   [
     'review',
-    /\b(?:review(?:ed)?|seen again|appointment|follow-?up|come back|return|(?:see|be seen|seen) (?:her|him|them|you|in (?:the )?clinic|again))\b/g,
+    /\b(?:review(?:ed)?|seen again|next visit|appointment|follow-?up|come back|return|(?:see|be seen|seen) (?:her|him|them|you|in (?:the )?clinic|again))\b/g,
   ],
   ['referral', /\b(?:referred|referral)\b/g],
   ['symptoms', /\b(?:symptoms?|onset)\b/g],

@@ -40,7 +40,9 @@ export const spansIn = (plain: string): Span[] =>
     const known = inDays[unit ?? over ?? ''];
     if (known === undefined) return [];
     // "Twice a day" is how often, "for a day" how long.
-    const lone = /^an? /.test(words) && !/\b(?:in|within|after|of) $/.test(plain.slice(0, match.index));
+    const lone =
+      /^an? /.test(words) &&
+      !/\b(?:in|within|after|of)(?: about| around)? $/.test(plain.slice(0, match.index));
     if (lone) return [];
     const number =
       short !== undefined ? Number(short) : /^an?$/.test(figure ?? '') ? 1 : numberOf(figure ?? '');
@@ -57,7 +59,7 @@ const topics: Topics<Topic> = [
   ['shield', /\bshield\b/g],
   [
     'review',
-    /\b(?:review(?:ed)?|seen(?: again)?|appointment|clinic|follow-?up|come back|return|see (?:her|him|them|you))\b/g,
+    /\b(?:review(?:ed)?|seen(?: again)?|appointment|clinic|follow-?up|come back|return|see(?= (?:in|again))|next visit|see (?:her|him|them|you))\b/g,
   ],
   [
     'oil',

@@ -50,7 +50,7 @@ const measures: readonly Measure[] = [
   },
   {
     before:
-      /\b(?:short(?:er|en(?:ed|ing))|tighten(?:ed|ing)|taken (?:in|up)|pulled up)(?: \w+){0,3}? ?(?:by |of |to |was |: ?)?$/,
+      /\b(?:short(?:er|en(?:ed|ing))|tighten(?:ed|ing)|taken (?:in|up)|(?:pulled|drawn) up)(?: \w+){0,3}? ?(?:by |of |to |was |: ?)?$/,
     after: /^ (?:of )?(?:shortening|tightening|shorter)/,
     values: (record) => numbers(elementsOf(record).map(({ shortenedMm }) => shortenedMm)),
     field: 'buckle.elements.0.shortenedMm',

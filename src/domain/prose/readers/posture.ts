@@ -31,7 +31,7 @@ const words: readonly (readonly [string, RegExp])[] = [
 
 /** Positions on the table and head positions in an examination are not aftercare. */
 const notAftercare =
-  /\b(?:on the table|under the drapes|draped?|positioned for|during (?:the )?(?:operation|surgery|exchange)|(?:for|in) (?:the )?(?:operation|surgery|injection|block|anaesthe\w+)|examin\w*|slit lamp|sat|anaesthe\w*|block|transferred|tray|piano|was seen|likes|as (?:he|she|they|you) (?:likes?|wish\w*)|postured)\b/;
+  /\b(?:on the table|under the drapes|draped?|positioned for|during (?:the )?(?:operation|surgery|exchange)|(?:for|in) (?:the )?(?:operation|surgery|injection|block|anaesthe\w+)|examin\w*|slit lamp|dressing|sat|anaesthe\w*|block|transferred|tray|piano|was seen|likes|as (?:he|she|they|you) (?:likes?|wish\w*)|postured)\b/;
 
 const none =
   /\b(?:no (?:particular |special |specific )?(?:postur(?:e|ing)|positioning)|need not posture|posture (?:is |was )?not (?:needed|required|necessary)|free position|no position needed|(?:in )?any position|any posture)\b/g;

@@ -136,7 +136,7 @@ export const readQuadrants: Reader = (clause, record) => {
       if (nearest === undefined || nearest.topic === 'other') continue;
       const half = quadrants.length > 1;
       const gap = follows ? plain.slice(end, nearest.at) : plain.slice(nearest.at, match.index);
-      if (half && gap.length > 22) continue;
+      if (half && gap.length > 28) continue;
       const allowed = allowedBy(nearest.topic, record, eye, half);
       if (allowed === undefined || allowed.quadrants.length === 0) continue;
       if (quadrants.some((quadrant) => allowed.quadrants.includes(quadrant))) continue;

@@ -73,6 +73,10 @@ const ofTheOther =
 
 const planned = /\b(?:planned|offered|next (?:year|visit|month)|prophylactic|as well|should not)\b/;
 
+/** "The left eye is unaffected": a state, where notes of an operation tell what was done. */
+const described =
+  /\b(?:right|left) eye (?:is|was|has|had|remains?|stays?|look(?:s|ed)|sees?)\b|\b(?:artificial|prosthe\w+|nothing|un(?:affected|injured|involved|remarkable)|injur\w+)\b/;
+
 /** Whether a clause speaks of the eye that is not operated on, and so of nothing that is recorded. */
 export const isOfFellowEye = (clause: Clause, record: CaseRecord): boolean => {
   const eye = record.who?.eye;
@@ -86,6 +90,7 @@ export const isOfFellowEye = (clause: Clause, record: CaseRecord): boolean => {
   if (first?.side === eye) return false;
   const plain = clause.plain.replace(/\bcataract (?:surgery|operation)\b/g, 'cataract');
   if (planned.test(plain)) return true;
+  if (described.test(plain) && !ofTheOperation.test(plain)) return true;
   return ofTheOther.test(plain) && !ofTheOperation.test(plain.replace(/\bno (?:new |other )?tears?\b/g, ''));
 };
 

@@ -9,7 +9,7 @@ const names: readonly { agent: string; words: string }[] = [
   {
     agent: 'silicone-oil',
     words:
-      '(?<!heavy )(?:light )?silicone oil|\\boil (?:tamponade|fill)|(?:air|fluid|pfcl|liquid|heavy liquid)[- ]oil(?: exchange)?|sio\\b|(?:1[,. ]?000|1[,. ]?300|5[,. ]?000) ?c(?:st|s|entistokes?)(?: oil)?',
+      '(?<!heavy )(?:light )?silicone oil|\\boil (?:tamponade|fill)|(?:air|fluid|pfcl|liquid|heavy liquid)[- ]oil(?: exchange)?|sio\\b|(?<=(?:\\band|\\bwith|\\bplus|[,+/:]) ?)oil(?= ?(?:[.,;+/]|$))|(?:1[,. ]?000|1[,. ]?300|5[,. ]?000) ?c(?:st|s|entistokes?)(?: oil)?',
   },
   {
     agent: 'air',
@@ -20,13 +20,21 @@ const names: readonly { agent: string; words: string }[] = [
 
 const allNames = names.map(({ words }) => words).join('|');
 const anyAgent = new RegExp(`(?<![\\w])(?:${allNames})(?![\\w-])`, 'g');
-const agentOf = (words: string) => names.find((name) => new RegExp(`^(?:${name.words})$`).test(words))?.agent;
+/** The lone words are known by what stands before them, which is not among them. */
+const lone: Readonly<Record<string, string>> = { oil: 'silicone-oil', air: 'air' };
+const agentOf = (words: string) =>
+  lone[words] ?? names.find((name) => new RegExp(`^(?:${name.words})$`).test(words))?.agent;
 const percentBefore = new RegExp(
   `(${NUMBER})[- ]?(?:%|per ?cent)(?: (?:of|isoexpansile|mixture of))? (?:${allNames})(?![\\w])`,
   'g',
 );
 const percentAfter = new RegExp(
   `(?:${allNames})(?:,| gas)?(?: at a concentration of| mix(?:ture)? of| at| of| mixture of| mixed to| to| diluted to| in a concentration of| -)? ?(?:\\((?:[a-z-]+, ?)?)?(${NUMBER})[- ]?(?:%|per ?cent)(?! (?:of|fill))`,
+  'g',
+);
+
+const percentFurther = new RegExp(
+  `(?:${allNames}|gas (?:concentration|mixture|mix))(?: (?!above|below|over|than|expands|fill|and|with)[a-z]+){0,4}:? (${NUMBER})[- ]?(?:%|per ?cent)(?! (?:of|fill))`,
   'g',
 );
 
@@ -67,10 +75,15 @@ const readConcentration: Reader = (clause, record) => {
   const percent = record.tamponade?.concentrationPercent;
   const agent = record.tamponade?.agent;
   if (typeof percent !== 'number' || agent === undefined) return [];
-  return [...clause.plain.matchAll(percentBefore), ...clause.plain.matchAll(percentAfter)]
-    .filter(
-      (match) => !negatedAt(clause.plain, match.index) && !sameNumber(numberOf(match[1] ?? ''), percent),
-    )
+  const seen = new Set<number>();
+  return [percentBefore, percentAfter, percentFurther]
+    .flatMap((words) => [...clause.plain.matchAll(words)])
+    .filter((match) => {
+      const at = match.index + match[0].lastIndexOf(match[1] ?? '');
+      const fresh = !seen.has(at);
+      seen.add(at);
+      return fresh && !negatedAt(clause.plain, match.index) && !sameNumber(numberOf(match[1] ?? ''), percent);
+    })
     .map((match) =>
       deny('concentration', clause, spanOf(match), 'tamponade.concentrationPercent', `${percent}%`),
     );

@@ -1,7 +1,7 @@
 import { defineRule } from '../../define-rule.ts';
 
 export const rule = defineRule({
-  id: 'steroid-and-antibiotic-missing',
+  id: 'no-drops-after-vitrectomy',
   family: 'medicines',
   level: 'caution',
   title: 'No drops at all after an operation inside the eye',
@@ -26,6 +26,6 @@ export const rule = defineRule({
         record: { vitreous: { vitrectomy: true }, aftercare: { drops: [{ drug: 'Dexamethasone' }] } },
       },
     ],
-    unknown: [{ name: 'vitrectomy not recorded', record: { aftercare: { drops: 'none' } } }],
+    unknown: [{ name: 'not recorded', record: { vitreous: { vitrectomy: true } } }],
   },
 });
