@@ -162,7 +162,6 @@ import { rule as nitrousOxideNotRecorded } from './rules/nitrous-oxide-not-recor
 import { rule as nitrousOxideStoppedOutsideOperation } from './rules/nitrous-oxide-stopped-outside-operation/rule.ts';
 import { rule as nitrousOxideToTheEnd } from './rules/nitrous-oxide-to-the-end/rule.ts';
 import { rule as noAntisepsis } from './rules/no-antisepsis/rule.ts';
-import { rule as noDropsAfterVitrectomy } from './rules/no-drops-after-vitrectomy/rule.ts';
 import { rule as noFlyingDateWithoutGas } from './rules/no-flying-date-without-gas/rule.ts';
 import { rule as noneBesideOthers } from './rules/none-beside-others/rule.ts';
 import { rule as oilInAphakicEye } from './rules/oil-in-aphakic-eye/rule.ts';
@@ -434,7 +433,6 @@ export const rules: readonly Rule[] = [
   nitrousOxideStoppedOutsideOperation,
   nitrousOxideToTheEnd,
   noAntisepsis,
-  noDropsAfterVitrectomy,
   noFlyingDateWithoutGas,
   noneBesideOthers,
   oilInAphakicEye,

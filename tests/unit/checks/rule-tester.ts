@@ -24,7 +24,7 @@ export const faultsOfForm = (rule: Rule): string[] => {
     why.length <= 200 ? '' : 'the reason is too long for one sentence',
     source.text.length > 3 ? '' : 'there is no source',
     level === 'contradiction' && answerable ? 'a contradiction is answerable' : '',
-    level !== 'contradiction' && !answerable ? 'neither a contradiction nor answerable' : '',
+    level === 'caution' && !answerable ? 'a caution is not answerable' : '',
     /\b(?:must|should|please|need to|has to)\b/i.test(title) ? 'the title instructs' : '',
   ].filter((fault) => fault !== '');
 };
