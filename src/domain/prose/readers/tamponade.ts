@@ -14,7 +14,7 @@ const names: readonly { agent: string; words: string }[] = [
   {
     agent: 'air',
     words:
-      'air (?:tamponade|bubble|fill|injection|injected|0\\.\\d)|(?:left|leaving|filled) (?:with|under|in) air|under air at (?:the )?end|(?:retinopexy|pneumatic) with air',
+      '(?<=(?:fill|tamponade|agent): ?)air\\b|air (?:tamponade|bubble|fill|injection|injected|0\\.\\d)|(?:left|leaving|filled) (?:with|under|in) air|under air at (?:the )?end|(?:retinopexy|pneumatic) with air',
   },
 ];
 
