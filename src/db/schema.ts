@@ -128,6 +128,26 @@ export const signedVersions = pgTable(
   ],
 );
 
+/** What was added to a signed note later, signed in the same way. The database refuses to change or delete it. */
+export const addenda = pgTable(
+  'addenda',
+  {
+    id: id(),
+    signedVersionId: uuid('signed_version_id')
+      .notNull()
+      .references(() => signedVersions.id),
+    number: integer('number').notNull(),
+    canonical: text('canonical').notNull(),
+    sha256: text('sha256').notNull(),
+    verificationCode: text('verification_code').notNull(),
+    signerId: uuid('signer_id')
+      .notNull()
+      .references(() => people.id),
+    signedAt: instant('signed_at').notNull(),
+  },
+  (table) => [uniqueIndex('addenda_of_version').on(table.signedVersionId, table.number)],
+);
+
 /** Who did what, in order; each entry holds the hash of the one before. Append-only. */
 export const auditLog = pgTable('audit_log', {
   position: bigint('position', { mode: 'number' }).primaryKey(),

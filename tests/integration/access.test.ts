@@ -37,6 +37,7 @@ const places: readonly { method: string; path: () => string; action: Action }[] 
   { method: 'GET', path: () => `/coding/${unknown}`, action: 'codes:read' },
   { method: 'GET', path: () => '/auditing', action: 'audit:list' },
   { method: 'GET', path: () => `/auditing/${unknown}`, action: 'signed:verify' },
+  { method: 'GET', path: () => `/signed/${unknown}`, action: 'signed:read' },
   { method: 'GET', path: () => '/recipients', action: 'recipients:read' },
   { method: 'GET', path: () => '/people', action: 'people:change' },
   { method: 'GET', path: () => '/unit', action: 'unit:change' },

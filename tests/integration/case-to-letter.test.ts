@@ -163,6 +163,25 @@ describe('signing', () => {
     await owner.query('alter table audit_log enable trigger all');
   });
 
+  it('is added to without being touched, and only with the password', async () => {
+    const { rows } = await owner.query('select id, sha256 from signed_versions');
+    const path = `/signed/${rows[0].id}`;
+    const add = (typed: string) =>
+      surgeon.post(path, {
+        reason: 'pathology came back',
+        text: 'The membrane was benign.',
+        password: typed,
+      });
+    expect((await add('wrong')).status).toBe(422);
+    expect((await add(password)).status).toBe(303);
+    const page = await (await surgeon.get(path)).text();
+    expect(page).toContain('The membrane was benign.');
+    expect(page).toContain('Because: pathology came back');
+    const after = await owner.query('select sha256 from signed_versions');
+    expect(after.rows).toEqual([{ sha256: rows[0].sha256 }]);
+    await expect(app.query("update addenda set canonical = '{}'")).rejects.toMatchObject({ code: '42501' });
+  });
+
   it('logs that a note was read', async () => {
     const { rows } = await owner.query(
       "select count(*)::int as reads from audit_log where action = 'note:read'",

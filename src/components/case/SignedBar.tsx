@@ -11,6 +11,7 @@ export const SignedBar = ({ signed }: { signed: CaseSigned }) => (
       <strong>{signed.verificationCode}</strong>.
     </span>
     <a href={`/api/signed/${signed.signedVersionId}/note.docx`}>Document (DOCX)</a>
+    <a href={`/signed/${signed.signedVersionId}`}>Add to the note</a>
     <a href="/">Back to the theatre list</a>
   </div>
 );

@@ -23,6 +23,7 @@ const table = {
   'case:sign': { roles: ['surgeon'], states: draftOnly },
   'signed:read': { roles: ['surgeon', 'secretary', 'coder', 'auditor'], states: signedOnly },
   'signed:verify': { roles: ['surgeon', 'auditor'], states: signedOnly },
+  'note:add-to': { roles: ['surgeon'], states: signedOnly },
   'letters:list': { roles: ['secretary', 'surgeon'] },
   'letter:read': { roles: ['secretary', 'surgeon'], states: signedOnly },
   'letter:write': { roles: ['secretary', 'surgeon'], states: signedOnly },

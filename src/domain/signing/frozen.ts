@@ -6,6 +6,19 @@ import type { CaseRecord } from '../record/schema.ts';
 
 export const FROZEN_FORMAT = 'buckram-signed-note-1';
 
+export const ADDENDUM_FORMAT = 'buckram-addendum-1';
+
+/** What was added to a signed note: why, in which words, by whom. Its canonical JSON is what is hashed and kept. */
+export interface FrozenAddendum {
+  format: typeof ADDENDUM_FORMAT;
+  /** SHA-256 of the note that it adds to. */
+  noteSha256: string;
+  number: number;
+  reason: string;
+  text: string;
+  signature: { name: string; title: string; at: string; zone: string };
+}
+
 /** Everything that a signature covers. Its canonical JSON is what is hashed and kept. */
 export interface FrozenNote {
   format: typeof FROZEN_FORMAT;

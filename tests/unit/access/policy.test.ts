@@ -12,6 +12,7 @@ const agreed: Readonly<Record<string, string>> = {
   'case:sign': 'surgeon | draft',
   'signed:read': 'surgeon secretary coder auditor | signed',
   'signed:verify': 'surgeon auditor | signed',
+  'note:add-to': 'surgeon | signed',
   'letters:list': 'surgeon secretary',
   'letter:read': 'surgeon secretary | signed',
   'letter:write': 'surgeon secretary | signed',
