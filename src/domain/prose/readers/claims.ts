@@ -202,7 +202,7 @@ export const claims: readonly Claim[] = [
         : vitreous.hyaloid === 'induced',
   ),
   claim(
-    /\b(?:ilm|internal limiting membrane)\b(?: (?:was |is )?(?:peeled|peel)|peeling)?(?! (?:was |is )?not peeled)/g,
+    /\b(?:ilm|internal limiting membrane)\b(?: (?:was |is )?(?:peeled|peel)|peeling)?/g,
     'vitreous.membranesPeeled',
     'ILM peel',
     ({ vitreous }) => among(vitreous?.membranesPeeled, 'ilm'),
