@@ -26,27 +26,31 @@ const unrecorded = new Set<PropertyKey>([
  */
 export const track = (record: CaseRecord): Tracked => {
   let current: Set<string> | undefined;
-  const known = new Map<string, object>();
-  const note = (path: string) => current?.add(path);
 
   const wrap = <T extends object>(target: T, path: string): T => {
-    const before = known.get(path);
-    if (before !== undefined) return before as T;
-    const proxy = new Proxy(target, {
-      get: (node, key, receiver): unknown => {
-        const value: unknown = Reflect.get(node, key, receiver);
-        if (typeof key === 'symbol' || unrecorded.has(key) || typeof value === 'function') return value;
-        const inner = path === '' ? key : `${path}.${key}`;
-        // A list is a fact of its own: that it is there, and how long it is.
-        if (Array.isArray(value)) note(inner);
-        if (isNode(value)) return wrap(value, inner);
-        if (Array.isArray(node) && key === 'length') return value;
-        note(inner);
+    const isList = Array.isArray(target);
+    const children = new Map<string, object>();
+    const inside = (key: string) => (path === '' ? key : `${path}.${key}`);
+    const childOf = (key: string, value: object): object => {
+      const before = children.get(key);
+      if (before !== undefined) return before;
+      const child = wrap(value, inside(key));
+      children.set(key, child);
+      return child;
+    };
+    return new Proxy(target, {
+      get: (node, key): unknown => {
+        const value: unknown = Reflect.get(node, key);
+        if (typeof key === 'symbol' || typeof value === 'function' || unrecorded.has(key)) return value;
+        if (isNode(value)) {
+          // A list is a fact of its own: that it is there, and how long it is.
+          if (Array.isArray(value)) current?.add(inside(key));
+          return childOf(key, value);
+        }
+        if (!(isList && key === 'length')) current?.add(inside(key));
         return value;
       },
     });
-    known.set(path, proxy);
-    return proxy;
   };
 
   return {

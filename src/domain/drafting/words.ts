@@ -82,18 +82,29 @@ export const withArticle = (noun: string): string =>
 export const lowerFirst = (text: string): string =>
   /^[A-Z][a-z]/.test(text) ? text.charAt(0).toLowerCase() + text.slice(1) : text;
 
-/** One tidy sentence: single spaces, no stray punctuation, a capital at the start, one stop at the end. */
-export const tidy = (text: string): string => {
-  if (text.trim() === '') return '';
-  const words = text
+/** Anything that there is to tidy: most sentences come out of their template without it. */
+const untidy = /\s\s|[^\S ]| [,.;:)]|\( |,[,.;]|[.!?]\.$/;
+
+const tidied = (text: string): string =>
+  text
     .replace(/\s+/g, ' ')
     .replace(/ ([,.;:)])/g, '$1')
     .replace(/\( /g, '(')
     .replace(/,+(?=[,.;])/g, '')
     .replace(/([.!?])\.+$/g, '$1')
     .trim();
+
+const ends = '.!?';
+const hanging = ',;:';
+
+/** One tidy sentence: single spaces, no stray punctuation, a capital at the start, one stop at the end. */
+export const tidy = (text: string): string => {
+  const trimmed = text.trim();
+  if (trimmed === '') return '';
+  const words = untidy.test(trimmed) ? tidied(trimmed) : trimmed;
   if (words === '' || /^[.,;:]+$/.test(words)) return '';
   const sentence = words.charAt(0).toUpperCase() + words.slice(1);
-  if (/^Dear .*,$/.test(sentence) || /[.!?]$/.test(sentence)) return sentence;
-  return `${sentence.replace(/[,;:]$/, '')}.`;
+  const last = sentence.charAt(sentence.length - 1);
+  if (ends.includes(last) || (last === ',' && sentence.startsWith('Dear '))) return sentence;
+  return `${hanging.includes(last) ? sentence.slice(0, -1) : sentence}.`;
 };
