@@ -1,4 +1,4 @@
-import { createServer } from 'node:http';
+import { createServer, get } from 'node:http';
 import { checkConfiguration } from './lib/configuration.mjs';
 import { Answer } from './lib/http/answer.mjs';
 import { bodyLimit, readBody } from './lib/http/body.mjs';
@@ -131,6 +131,11 @@ server.once('error', (error) => {
   process.exit(1);
 });
 server.listen(config.port, config.host, () => {
+  // The first request starts the work in the background: letters that were queued before a stop go out without anybody coming.
+  const { host, port } = config;
+  get({ host, port, path: '/sign-in', headers: { host: `127.0.0.1:${port}` } }, (answer) =>
+    answer.resume(),
+  ).on('error', () => undefined);
   if (process.send) process.send('listening');
   else console.log(`Listening on http://${config.host}:${config.port}`);
 });

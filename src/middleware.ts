@@ -1,6 +1,7 @@
 import { defineMiddleware } from 'astro:middleware';
 import { readVisit } from './server/accounts/visit.ts';
 import { log } from './server/http/log.ts';
+import { jobs } from './server/jobs/boss.ts';
 
 /** Pages that are there before anybody has signed in. */
 const open = new Set(['/sign-in', '/404', '/403', '/500']);
@@ -14,6 +15,10 @@ const allowStyleAttributes = (headers: Headers) => {
 export const onRequest = defineMiddleware(async (context, next) => {
   if (context.isPrerendered) return next();
   const begun = performance.now();
+  // The queue works from the first request on, and a server that starts makes one to itself: letters do not wait for somebody to come.
+  jobs().catch((error: unknown) => {
+    log().error({ name: error instanceof Error ? error.name : 'unknown' }, 'the job queue could not start');
+  });
   const visit = await readVisit(context.cookies);
   if (visit !== undefined) context.locals.visit = visit;
   const isApi = context.url.pathname.startsWith('/api/');

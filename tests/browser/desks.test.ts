@@ -158,14 +158,15 @@ describe('a letter', () => {
   it('shows what the signed note denies, goes out once mended, and says that it has gone', async () => {
     const page = await enter('secretary', '/letters');
     await page.click('text=Letter to the referring doctor');
-    const send = page.locator('aside button.button');
-    await page.waitForSelector('text=named in the record');
+    const send = page.getByRole('button', { name: 'Send', exact: true });
+    await page.waitForSelector('text=named in the signed note as referring doctor');
     const words = page.locator('textarea').nth(2);
     const drafted = await words.inputValue();
     await words.fill('Surgery to the right eye.');
     await page.waitForSelector('text=the signed note says left eye');
     await page.getByLabel(/Fern Mossgrove/).check();
-    expect(await send.textContent()).toContain('words against the signed note');
+    expect(await page.textContent('#in-the-way')).toContain('otherwise than the signed note');
+    expect(await send.isDisabled()).toBe(true);
     await words.fill(drafted);
     await page.waitForSelector('text=saved');
     await send.click();

@@ -261,34 +261,33 @@ describe('letters', () => {
     expect(head).toContain('Subject: Letter from Larkfield Eye Unit');
   });
 
-  it('come back to the desk with a reason when they are refused', async () => {
-    const { id, revision, sheet } = await letterOf('patient');
-    await secretary.send(
-      'PUT',
-      `/api/letters/${id}`,
-      { sheet, recipientId: await readerId('Bram Larkwood') },
-      revision,
-    );
-    await secretary.send('POST', `/api/letters/${id}/send`, {}, revision + 1);
+  it('come back to the desk with a reason when they are refused, and go by themselves when a mail server was only busy', async () => {
+    const { id, revision, sheet } = await letterOf('family-doctor');
+    const sendTo = async (name: string, upon: number) => {
+      await secretary.send('PUT', `/api/letters/${id}`, { sheet, recipientId: await readerId(name) }, upon);
+      expect((await secretary.send('POST', `/api/letters/${id}/send`, {}, upon + 1)).status).toBe(200);
+    };
+    await sendTo('Bram Larkwood', revision);
     await until(async () => (await stateOf(id)).state === 'failed');
     expect((await stateOf(id)).last_error).toContain('Check the address');
-  });
-});
-
-describe('a mail server that is busy', () => {
-  it('gets the letter by itself when it is tried again', async () => {
-    const { rows } = await owner.query(
-      "select id, revision, sheet from letters where kind = 'family-doctor'",
-    );
-    const { id, revision, sheet } = rows[0];
-    const reader = await owner.query("select id from recipients where name = 'Dr Hazel Underwillow'");
-    await secretary.send('PUT', `/api/letters/${id}`, { sheet, recipientId: reader.rows[0].id }, revision);
-    await secretary.send('POST', `/api/letters/${id}/send`, {}, revision + 1);
-    await until(async () => {
-      const letter = await owner.query('select state, attempts from letters where id = $1', [id]);
-      return letter.rows[0].state === 'sent' && letter.rows[0].attempts === 2;
-    });
+    await sendTo('Dr Hazel Underwillow', revision + 1);
+    await until(async () => (await stateOf(id)).state === 'sent');
     expect(busyTimes).toBe(1);
+    const { rows } = await owner.query('select attempts from letters where id = $1', [id]);
+    expect(rows[0].attempts).toBe(3);
+  });
+
+  it('to the patient go on paper, not to somebody in the directory', async () => {
+    const { id, revision, sheet } = await letterOf('patient');
+    const fern = await readerId('Fern Mossgrove');
+    await secretary.send('PUT', `/api/letters/${id}`, { sheet, recipientId: fern }, revision);
+    const mailed = await secretary.send('POST', `/api/letters/${id}/send`, {}, revision + 1);
+    expect(await mailed.json()).toMatchObject({ code: 'no-recipient' });
+    await secretary.send('PUT', `/api/letters/${id}`, { sheet, recipientId: null }, revision + 1);
+    const handed = await secretary.send('POST', `/api/letters/${id}/send`, { by: 'paper' }, revision + 2);
+    expect(handed.status).toBe(200);
+    const view = await (await secretary.get(`/api/letters/${id}`)).json();
+    expect(view).toMatchObject({ state: 'sent', sentTo: null, sentAt: expect.any(String) });
   });
 });
 

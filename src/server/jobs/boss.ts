@@ -3,10 +3,11 @@ import { atStop } from '../at-stop.ts';
 import { config } from '../config.ts';
 import { database } from '../database.ts';
 import { log } from '../http/log.ts';
-import { queuedLetters, sendLetter } from '../letters/send.ts';
+import { forgottenLetters, sendLetter } from '../letters/send.ts';
 
 const SEND_LETTER = 'send-letter';
 const RETRIES = 6;
+const SWEEP_MS = 60_000;
 
 interface SendLetter {
   letterId: string;
@@ -38,10 +39,18 @@ const start = async (): Promise<PgBoss> => {
       if (outcome === 'try-again') throw new Error('The letter could not be handed over yet.');
     },
   );
-  for (const letterId of await queuedLetters(database())) {
+  await takeUpForgotten(boss);
+  const sweep = setInterval(() => void takeUpForgotten(boss).catch(() => undefined), SWEEP_MS);
+  sweep.unref();
+  atStop(async () => clearInterval(sweep));
+  return boss;
+};
+
+/** Asks again for letters that are queued but have no job: the process that should have asked died, or every try was cut short. */
+const takeUpForgotten = async (boss: PgBoss): Promise<void> => {
+  for (const letterId of await forgottenLetters(database(), SEND_LETTER)) {
     await boss.send(SEND_LETTER, { letterId } satisfies SendLetter, options(letterId));
   }
-  return boss;
 };
 
 /** The job queue of this process, started at the first use; every process works on the same jobs. */
@@ -53,7 +62,17 @@ export const jobs = (): Promise<PgBoss> => {
   return running;
 };
 
-/** Asks for a queued letter to be sent. Call after the commit that queued it. */
+/**
+ * Asks for a queued letter to be sent. Call after the commit that queued it: the letter goes whatever happens here, because what is
+ * queued without a job is taken up again.
+ */
 export const requestSending = async (letterId: string): Promise<void> => {
-  await (await jobs()).send(SEND_LETTER, { letterId } satisfies SendLetter, options(letterId));
+  try {
+    await (await jobs()).send(SEND_LETTER, { letterId } satisfies SendLetter, options(letterId));
+  } catch (error) {
+    log().error(
+      { name: error instanceof Error ? error.name : 'unknown' },
+      'a letter waits for the job queue',
+    );
+  }
 };

@@ -2,6 +2,8 @@ import { and, asc, eq } from 'drizzle-orm';
 import type { Database } from '../../db/client.ts';
 import { cases, letters, recipients, signedVersions } from '../../db/schema.ts';
 import type { Sheet } from '../../domain/drafting/sheet.ts';
+import type { LetterView, SaveLetter } from '../../domain/letters/api.ts';
+import { keepWords } from '../../domain/letters/words.ts';
 import type { ProseFinding } from '../../domain/prose/finding.ts';
 import { readProse } from '../../domain/prose/read.ts';
 import type { CaseRecord } from '../../domain/record/schema.ts';
@@ -10,11 +12,9 @@ import type { FrozenNote } from '../../domain/signing/frozen.ts';
 import { actorOf, type Visit } from '../accounts/visit.ts';
 import { appendAudit } from '../audit/log.ts';
 import { database } from '../database.ts';
-import { letterDocx } from '../documents/letter-docx.ts';
-import { localDay } from '../local-day.ts';
 
-type LetterRow = typeof letters.$inferSelect;
-type RecipientRow = typeof recipients.$inferSelect;
+export type LetterRow = typeof letters.$inferSelect;
+export type RecipientRow = typeof recipients.$inferSelect;
 
 export interface OpenLetter {
   letter: LetterRow;
@@ -47,6 +47,27 @@ const find = async (
 export const loadLetter = (db: Database, unitId: string, id: string): Promise<OpenLetter | undefined> =>
   find(db, unitId, id, false);
 
+export const missing = () => fail('not-found', 'There is no such letter.');
+
+const stale = () =>
+  fail('stale', 'Somebody changed this letter meanwhile. Your words are still here; nothing was lost.');
+const notWaiting = () =>
+  fail('not-waiting', 'This letter is on its way or sent. It can no longer be changed.');
+
+/** The letter, locked until the transaction ends, if it may still be changed upon this revision. */
+export const lockOpen = async (
+  tx: Database,
+  unitId: string,
+  id: string,
+  revision: number,
+): Promise<Result<OpenLetter>> => {
+  const found = await find(tx, unitId, id, true);
+  if (found === undefined) return missing();
+  const { state } = found.letter;
+  if (state !== 'waiting' && state !== 'failed') return notWaiting();
+  return found.letter.revision === revision ? ok(found) : stale();
+};
+
 /** Words of a letter that the signed facts deny, by statement. What was drafted from them cannot. */
 export const deniedIn = (sheet: Sheet, record: CaseRecord): { statement: string; found: ProseFinding[] }[] =>
   sheet.sections.flatMap(({ statements }) =>
@@ -56,107 +77,75 @@ export const deniedIn = (sheet: Sheet, record: CaseRecord): { statement: string;
     }),
   );
 
+/** Whom the record names as this letter's reader; shown as a suggestion with that reason, never chosen for anybody. */
+export const namedReader = ({ letter, note }: OpenLetter): { name: string; as: string } | undefined => {
+  const { referrer, familyDoctor } = note.record.who ?? {};
+  if (letter.kind === 'family-doctor' && familyDoctor !== undefined)
+    return { name: familyDoctor, as: 'family doctor' };
+  if (letter.kind === 'referring-doctor' && referrer?.name !== undefined)
+    return { name: referrer.name, as: 'referring doctor' };
+  return undefined;
+};
+
+const plainName = (name: string) => name.trim().replace(/\s+/g, ' ').toLowerCase();
+
 /** Everybody in the directory, by name; only whom somebody confirmed can be written to. */
-export const recipientsOf = (db: Database, unitId: string): Promise<RecipientRow[]> =>
-  db
+export const readersFor = async (db: Database, unitId: string, named: string | undefined) => {
+  const rows = await db
     .select()
     .from(recipients)
     .where(and(eq(recipients.unitId, unitId), eq(recipients.active, true)))
     .orderBy(asc(recipients.name), asc(recipients.id));
+  return rows.map(({ id, name, practice, address, email, confirmedAt }) => ({
+    id,
+    name,
+    practice,
+    address,
+    email,
+    isConfirmed: confirmedAt !== null,
+    isNamed: named !== undefined && plainName(name) === plainName(named),
+  }));
+};
 
-/** Whom the record names as this letter's reader; shown as a suggestion with that reason, never chosen for anybody. */
-export const namedReader = ({ letter, note }: OpenLetter): string | undefined =>
-  letter.kind === 'family-doctor'
-    ? note.record.who?.familyDoctor
-    : letter.kind === 'referring-doctor'
-      ? note.record.who?.referrer?.name
-      : undefined;
+const when = new Intl.DateTimeFormat('en-GB', { dateStyle: 'long', timeStyle: 'short' });
 
-const stale = () =>
-  fail('stale', 'Somebody changed this letter meanwhile. Your words are still here; reload to see theirs.');
-const notWaiting = () =>
-  fail('not-waiting', 'This letter is on its way or sent. It can no longer be changed.');
-const missing = () => fail('not-found', 'There is no such letter.');
+/** What a letter's page shows and asks for again. */
+export const viewOf = ({ letter }: OpenLetter): LetterView => ({
+  state: letter.state,
+  revision: letter.revision,
+  sheet: letter.sheet,
+  recipientId: letter.recipientId,
+  lastError: letter.lastError,
+  sentAt: letter.sentAt === null ? null : when.format(letter.sentAt),
+  sentTo: letter.sentTo,
+});
 
-const isOpen = ({ state }: LetterRow) => state === 'waiting' || state === 'failed';
+const isListed = async (tx: Database, unitId: string, id: string): Promise<boolean> => {
+  const [row] = await tx
+    .select({ id: recipients.id })
+    .from(recipients)
+    .where(and(eq(recipients.id, id), eq(recipients.unitId, unitId)));
+  return row !== undefined;
+};
 
 /** Keeps the secretary's words and choice of reader upon a revision. */
 export const saveLetter = (
   visit: Visit,
   id: string,
   revision: number,
-  change: { sheet: Sheet; recipientId: string | null },
+  { sheet, recipientId }: SaveLetter,
 ): Promise<Result<{ revision: number }>> =>
   database().transaction(async (tx) => {
-    const found = await find(tx, visit.unit.id, id, true);
-    if (found === undefined) return missing();
-    if (!isOpen(found.letter)) return notWaiting();
-    if (found.letter.revision !== revision) return stale();
+    const open = await lockOpen(tx, visit.unit.id, id, revision);
+    if (!open.ok) return open;
+    if (recipientId !== null && !(await isListed(tx, visit.unit.id, recipientId))) {
+      return fail('no-recipient', 'This reader is not in the directory. Choose another.');
+    }
     const next = revision + 1;
     await tx
       .update(letters)
-      .set({ ...change, revision: next })
+      .set({ sheet: keepWords(open.value.letter.sheet, sheet), recipientId, revision: next })
       .where(eq(letters.id, id));
     await appendAudit(tx, actorOf(visit), 'letter:saved', id, { revision: next });
     return ok({ revision: next });
-  });
-
-const addressOf = ({ name, practice, address }: RecipientRow): string[] => [
-  name,
-  practice,
-  ...address.split('\n'),
-];
-
-export const documentOf = (
-  { note, letter, code }: OpenLetter,
-  reader: RecipientRow | undefined,
-): Promise<Uint8Array> =>
-  letterDocx({
-    note,
-    code,
-    sheet: letter.sheet,
-    recipient: reader === undefined ? [] : addressOf(reader),
-    on: localDay(letter.queuedAt ?? new Date()),
-  });
-
-/**
- * Freezes a letter and puts it in the queue: only to a confirmed address, only when nothing in it is denied by the signed facts, only
- * once. The caller asks for the sending after the commit.
- */
-export const queueLetter = (visit: Visit, id: string, revision: number): Promise<Result<null>> =>
-  database().transaction(async (tx) => {
-    const found = await find(tx, visit.unit.id, id, true);
-    if (found === undefined) return missing();
-    const { letter, note } = found;
-    if (!isOpen(letter)) return notWaiting();
-    if (letter.revision !== revision) return stale();
-    if (letter.recipientId === null) return fail('no-recipient', 'Choose whom the letter goes to.');
-    const [reader] = await tx
-      .select()
-      .from(recipients)
-      .where(and(eq(recipients.id, letter.recipientId), eq(recipients.unitId, visit.unit.id)));
-    if (reader?.confirmedAt == null || !reader.active) {
-      return fail(
-        'not-confirmed',
-        'Nobody has confirmed this address yet. Confirm it in the directory first.',
-      );
-    }
-    if (deniedIn(letter.sheet, note.record).length > 0) {
-      return fail('denied', 'Some words say otherwise than the signed note. Change them before sending.');
-    }
-    const queuedAt = new Date();
-    const docx = Buffer.from(await documentOf({ ...found, letter: { ...letter, queuedAt } }, reader));
-    await tx
-      .update(letters)
-      .set({
-        state: 'queued',
-        queuedAt,
-        queuedBy: visit.person.id,
-        sentTo: reader.email,
-        docx,
-        lastError: null,
-      })
-      .where(eq(letters.id, id));
-    await appendAudit(tx, actorOf(visit), 'letter:queued', id, { recipient: reader.id });
-    return ok(null);
   });

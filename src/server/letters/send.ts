@@ -1,4 +1,4 @@
-import { and, eq } from 'drizzle-orm';
+import { and, eq, sql } from 'drizzle-orm';
 import type { Database } from '../../db/client.ts';
 import { cases, letters, signedVersions, units } from '../../db/schema.ts';
 import { type Actor, appendAudit } from '../audit/log.ts';
@@ -58,8 +58,14 @@ export const sendLetter = (db: Database, letterId: string, lastTry: boolean): Pr
     return givenUp ? 'failed' : 'try-again';
   });
 
-/** Letters that were queued but whose job may have been lost with the process that made it. */
-export const queuedLetters = async (db: Database): Promise<string[]> => {
-  const rows = await db.select({ id: letters.id }).from(letters).where(eq(letters.state, 'queued'));
+/** Letters that are queued and have no live job in this queue. */
+export const forgottenLetters = async (db: Database, queue: string): Promise<string[]> => {
+  const { rows } = await db.execute<{ id: string }>(sql`
+    select id from letters
+    where state = 'queued' and not exists (
+      select from pgboss.job
+      where name = ${queue} and singleton_key = letters.id::text and state in ('created', 'retry', 'active')
+    )
+    order by queued_at, id`);
   return rows.map(({ id }) => id);
 };

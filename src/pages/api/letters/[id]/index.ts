@@ -1,17 +1,14 @@
 import { saveLetterInput } from '../../../../domain/letters/api.ts';
 import { database } from '../../../../server/database.ts';
 import { route } from '../../../../server/http/route.ts';
-import { loadLetter, saveLetter } from '../../../../server/letters/letter.ts';
+import { loadLetter, missing, saveLetter, viewOf } from '../../../../server/letters/letter.ts';
 
-/** How far a letter is, for the page that waits. */
+/** How far a letter is and what it says now, for the page that waits or has to compare. */
 export const GET = route({
   action: 'letter:read',
   run: async ({ visit, params }) => {
     const found = await loadLetter(database(), visit.unit.id, params.id ?? '');
-    if (found === undefined)
-      return { ok: false, error: { code: 'not-found', message: 'There is no such letter.' } };
-    const { state, lastError, attempts } = found.letter;
-    return { ok: true, value: { state, lastError, attempts } };
+    return found === undefined ? missing() : { ok: true, value: viewOf(found) };
   },
 });
 

@@ -1,20 +1,12 @@
-import { database } from '../../../../server/database.ts';
-import { documentName } from '../../../../server/documents/document-name.ts';
 import { download } from '../../../../server/http/download.ts';
 import { route } from '../../../../server/http/route.ts';
-import { documentOf, loadLetter, recipientsOf } from '../../../../server/letters/letter.ts';
+import { openDocument } from '../../../../server/letters/document.ts';
 
 /** What was sent, or what would be sent now. */
 export const GET = route({
   action: 'letter:read',
   run: async ({ visit, params }) => {
-    const found = await loadLetter(database(), visit.unit.id, params.id ?? '');
-    if (found === undefined)
-      return { ok: false, error: { code: 'not-found', message: 'There is no such letter.' } };
-    const reader = (await recipientsOf(database(), visit.unit.id)).find(
-      ({ id }) => id === found.letter.recipientId,
-    );
-    const docx = found.letter.docx ?? (await documentOf(found, reader));
-    return download(documentName('letter', found.code), docx);
+    const found = await openDocument(visit, params.id ?? '');
+    return found.ok ? download(found.value.name, found.value.docx) : found;
   },
 });
