@@ -149,16 +149,20 @@ export const addenda = pgTable(
 );
 
 /** Who did what, in order; each entry holds the hash of the one before. Append-only. */
-export const auditLog = pgTable('audit_log', {
-  position: bigint('position', { mode: 'number' }).primaryKey(),
-  at: instant('at').notNull(),
-  personId: uuid('person_id'),
-  action: text('action').notNull(),
-  subject: text('subject').notNull(),
-  detail: jsonb('detail').$type<Record<string, string | number | boolean>>().notNull(),
-  previousHash: text('previous_hash').notNull(),
-  hash: text('hash').notNull(),
-});
+export const auditLog = pgTable(
+  'audit_log',
+  {
+    position: bigint('position', { mode: 'number' }).primaryKey(),
+    at: instant('at').notNull(),
+    personId: uuid('person_id'),
+    action: text('action').notNull(),
+    subject: text('subject').notNull(),
+    detail: jsonb('detail').$type<Record<string, string | number | boolean>>().notNull(),
+    previousHash: text('previous_hash').notNull(),
+    hash: text('hash').notNull(),
+  },
+  (table) => [index('audit_log_by_subject').on(table.subject, table.position)],
+);
 
 /** What a unit settled about a caution, each time with a reason; the latest for a rule counts. Append-only. */
 export const checkSettings = pgTable(

@@ -1,8 +1,8 @@
-import { createHash } from 'node:crypto';
 import { asc, desc, gt, sql } from 'drizzle-orm';
 import type { Database } from '../../db/client.ts';
 import { auditLog } from '../../db/schema.ts';
-import { canonical } from '../../domain/signing/canonical.ts';
+import { type End, type Entry, follow, START, textOf } from '../../domain/signing/chain.ts';
+import { sha256 } from '../signing/sha256.ts';
 
 /** On whose behalf something is done; `personId` is null for work in the background. */
 export interface Actor {
@@ -10,74 +10,60 @@ export interface Actor {
   unitId: string;
 }
 
-type Detail = Readonly<Record<string, string | number | boolean>>;
-
 /** Any number will do, as long as everybody who appends asks for the same one. */
 const APPEND_LOCK = 4_871_136;
-const GENESIS = '0'.repeat(64);
 
-interface Entry {
-  position: number;
-  at: string;
-  personId: string | null;
-  action: string;
-  subject: string;
-  detail: Detail;
-  previousHash: string;
-}
-
-const hashOf = (entry: Entry): string => createHash('sha256').update(canonical(entry)).digest('hex');
+const endOf = async (db: Database): Promise<End> => {
+  const [last] = await db
+    .select({ position: auditLog.position, hash: auditLog.hash })
+    .from(auditLog)
+    .orderBy(desc(auditLog.position))
+    .limit(1);
+  return last ?? START;
+};
 
 /**
  * Appends to the audit log inside the caller's transaction, so that what was done and its entry stand or fall together.
- * `detail` never holds patient data.
+ * Whoever appends next waits for the end of that transaction: append last. `detail` never holds patient data.
  */
 export const appendAudit = async (
   tx: Database,
   actor: Actor,
   action: string,
   subject: string,
-  detail: Detail = {},
+  detail: Entry['detail'] = {},
 ): Promise<void> => {
   await tx.execute(sql`select pg_advisory_xact_lock(${APPEND_LOCK})`);
-  const [last] = await tx
-    .select({ position: auditLog.position, hash: auditLog.hash })
-    .from(auditLog)
-    .orderBy(desc(auditLog.position))
-    .limit(1);
+  const end = await endOf(tx);
   const at = new Date();
   const entry: Entry = {
-    position: (last?.position ?? 0) + 1,
+    position: end.position + 1,
     at: at.toISOString(),
     personId: actor.personId,
     action,
     subject,
     detail,
-    previousHash: last?.hash ?? GENESIS,
+    previousHash: end.hash,
   };
-  await tx.insert(auditLog).values({ ...entry, at, detail: { ...detail }, hash: hashOf(entry) });
+  await tx.insert(auditLog).values({ ...entry, at, detail: { ...detail }, hash: sha256(textOf(entry)) });
 };
 
 const PAGE = 1000;
 
 /** Walks the whole chain: the first position whose hash or link does not hold, or `null`. */
 export const firstBrokenPosition = async (db: Database): Promise<number | null> => {
-  let previousHash = GENESIS;
-  let position = 0;
+  let end = START;
   for (;;) {
     const rows = await db
       .select()
       .from(auditLog)
-      .where(gt(auditLog.position, position))
+      .where(gt(auditLog.position, end.position))
       .orderBy(asc(auditLog.position))
       .limit(PAGE);
-    for (const { hash, at, ...row } of rows) {
-      position += 1;
-      const entry: Entry = { ...row, at: at.toISOString() };
-      if (row.position !== position || row.previousHash !== previousHash || hash !== hashOf(entry))
-        return position;
-      previousHash = hash;
-    }
+    const links = rows.map(({ hash, at, ...row }) => ({ hash, entry: { ...row, at: at.toISOString() } }));
+    const followed = follow(end, links, sha256);
+    if (!followed.holds) return followed.position;
     if (rows.length < PAGE) return null;
+    end = followed.end;
   }
 };

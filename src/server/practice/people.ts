@@ -1,11 +1,11 @@
 import { and, asc, eq } from 'drizzle-orm';
 import { z } from 'zod';
 import type { Database } from '../../db/client.ts';
-import { people } from '../../db/schema.ts';
+import { people, sessions } from '../../db/schema.ts';
 import { roles } from '../../domain/access/policy.ts';
 import { ok, type Result } from '../../domain/result.ts';
+import { forgetAttempts } from '../accounts/attempts.ts';
 import { hashPassword } from '../accounts/passwords.ts';
-import { lucia } from '../accounts/sessions.ts';
 import { actorOf, type Visit } from '../accounts/visit.ts';
 import { appendAudit } from '../audit/log.ts';
 import { database } from '../database.ts';
@@ -48,23 +48,24 @@ export const addPerson = async (visit: Visit, sent: FormData): Promise<Result<nu
   });
 };
 
+const isId = z.guid();
+
 /** Lets somebody in or keeps them out; whoever is kept out is signed out at once. Nobody can keep themselves out. */
 export const setActive = async (visit: Visit, id: string, active: boolean): Promise<void> => {
-  if (id === visit.person.id) return;
-  const changed = await database().transaction(async (tx) => {
+  if (id === visit.person.id || !isId.safeParse(id).success) return;
+  await database().transaction(async (tx) => {
     const [row] = await tx
       .update(people)
       .set({ active })
       .where(and(eq(people.id, id), eq(people.unitId, visit.unit.id)))
       .returning({ id: people.id });
-    if (row !== undefined)
-      await appendAudit(tx, actorOf(visit), active ? 'person:activated' : 'person:deactivated', id);
-    return row !== undefined;
+    if (row === undefined) return;
+    if (!active) await tx.delete(sessions).where(eq(sessions.userId, id));
+    await appendAudit(tx, actorOf(visit), active ? 'person:activated' : 'person:deactivated', id);
   });
-  if (changed && !active) await lucia().invalidateUserSessions(id);
 };
 
-/** Gives somebody a new password and ends their sessions. */
+/** Gives somebody a new password, ends their sessions and lets them try at once, all or nothing. */
 export const setPassword = async (
   visit: Visit,
   id: string,
@@ -73,15 +74,19 @@ export const setPassword = async (
   const read = password.safeParse(chosen);
   if (!read.success)
     return { ok: false, error: { errors: { password: read.error.issues[0]?.message ?? '' }, typed: {} } };
+  if (!isId.safeParse(id).success) return ok(null);
   const passwordHash = await hashPassword(read.data);
-  await database().transaction(async (tx) => {
+  const changed = await database().transaction(async (tx) => {
     const [row] = await tx
       .update(people)
       .set({ passwordHash })
       .where(and(eq(people.id, id), eq(people.unitId, visit.unit.id)))
-      .returning({ id: people.id });
-    if (row !== undefined) await appendAudit(tx, actorOf(visit), 'person:password-set', id);
+      .returning({ id: people.id, email: people.email });
+    if (row === undefined) return undefined;
+    await tx.delete(sessions).where(eq(sessions.userId, id));
+    await appendAudit(tx, actorOf(visit), 'person:password-set', id);
+    return row;
   });
-  await lucia().invalidateUserSessions(id);
+  if (changed !== undefined) await forgetAttempts(changed);
   return ok(null);
 };

@@ -7,8 +7,10 @@ import { ADDENDUM_FORMAT, type FrozenAddendum } from '../../domain/signing/froze
 import { confirmPassword } from '../accounts/sign-in.ts';
 import { actorOf, type Visit } from '../accounts/visit.ts';
 import { appendAudit } from '../audit/log.ts';
+import { lockCase } from '../cases/load.ts';
 import { database } from '../database.ts';
-import { sha256, ZONE } from './sign.ts';
+import { sha256 } from './sha256.ts';
+import { ZONE } from './sign.ts';
 import { readSigned } from './signed-version.ts';
 
 export interface Addendum {
@@ -37,24 +39,29 @@ export const addAddendum = async (
   visit: Visit,
   signedVersionId: string,
   given: { reason: string; text: string; password: string },
-  place: string,
 ): Promise<Result<null>> => {
   const [reason, text] = [given.reason.trim(), given.text.trim()];
   if (reason.length < 3) return fail('reason', 'Write why the note is added to.');
+  if (reason.length > 1000)
+    return fail('reason', 'Use at most 1000 characters; the rest belongs in the text.');
   if (text.length < 3) return fail('text', 'Write what is added.');
-  const confirmed = await confirmPassword(visit.person, given.password, place);
+  if (text.length > 8000)
+    return fail('text', 'Use at most 8000 characters, and a second addendum for the rest.');
+  const confirmed = await confirmPassword(visit.person, given.password);
   if (!confirmed.ok) return confirmed;
   return database().transaction(async (tx) => {
     const found = await readSigned(tx, visit.unit.id, { id: signedVersionId });
     if (found === undefined) return fail('not-found', 'There is no such note.');
+    // Two people may add at once: the second waits for the number of the first.
+    await lockCase(tx, visit.unit.id, found.row.caseId);
     const number = (await addendaOf(tx, signedVersionId)).length + 1;
     const signedAt = new Date();
     const frozen: FrozenAddendum = {
       format: ADDENDUM_FORMAT,
       noteSha256: found.row.sha256,
       number,
-      reason: reason.slice(0, 1000),
-      text: text.slice(0, 8000),
+      reason,
+      text,
       signature: {
         name: visit.person.name,
         title: visit.person.title,

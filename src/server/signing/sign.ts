@@ -1,4 +1,4 @@
-import { createHash, randomUUID } from 'node:crypto';
+import { randomUUID } from 'node:crypto';
 import { eq } from 'drizzle-orm';
 import { cases, signedVersions } from '../../db/schema.ts';
 import { type ApiError, type CaseSigned, meanings, type SignCase } from '../../domain/api.ts';
@@ -20,9 +20,7 @@ import { database } from '../database.ts';
 import { noteDocx } from '../documents/note-docx.ts';
 import { draftLettersOf } from '../letters/on-signed.ts';
 import { settingsOf } from '../practice/check-settings.ts';
-
-export const sha256 = (content: string | Uint8Array): string =>
-  createHash('sha256').update(content).digest('hex');
+import { sha256 } from './sha256.ts';
 
 /** The zone in which times are printed. */
 export const ZONE = Intl.DateTimeFormat().resolvedOptions().timeZone;
@@ -36,10 +34,9 @@ export const signCase = async (
   caseId: string,
   revision: number,
   { password, meaning }: SignCase,
-  place: string,
 ): Promise<Result<CaseSigned, ApiError>> => {
   const { person, unit } = visit;
-  const confirmed = await confirmPassword(person, password, place);
+  const confirmed = await confirmPassword(person, password);
   if (!confirmed.ok) return confirmed;
   return database().transaction(async (tx): Promise<Result<CaseSigned, ApiError>> => {
     const asked = { unitId: unit.id, roles: person.roles, caseId, revision };
@@ -79,6 +76,7 @@ export const signCase = async (
     const hash = sha256(text);
     const code = verificationCode(hash);
     const docx = Buffer.from(await noteDocx(frozen, { sha256: hash, code }));
+    const docxHash = sha256(docx);
     const signedVersionId = randomUUID();
     await tx.insert(signedVersions).values({
       id: signedVersionId,
@@ -90,15 +88,16 @@ export const signCase = async (
       signerId: person.id,
       signedAt,
       docx,
-      docxSha256: sha256(docx),
+      docxSha256: docxHash,
     });
     await tx.update(cases).set({ state: 'signed' }).where(eq(cases.id, caseId));
+    await draftLettersOf(tx, signedVersionId, frozen);
     await appendAudit(tx, actorOf(visit), 'note:signed', signedVersionId, {
       caseId,
       sha256: hash,
-      version: 1,
+      docxSha256: docxHash,
+      version: frozen.version,
     });
-    await draftLettersOf(tx, signedVersionId, frozen);
     return ok({
       signedVersionId,
       version: frozen.version,

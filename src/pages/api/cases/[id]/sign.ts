@@ -6,6 +6,5 @@ export const POST = route({
   action: 'case:sign',
   input: signCaseInput,
   ifMatch: true,
-  run: ({ visit, params, revision, input, context }) =>
-    signCase(visit, params.id ?? '', revision, input, context.clientAddress),
+  run: ({ visit, params, revision, input }) => signCase(visit, params.id ?? '', revision, input),
 });
