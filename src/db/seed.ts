@@ -1,3 +1,4 @@
+import { sql } from 'drizzle-orm';
 import { hashPassword } from '../server/accounts/passwords.ts';
 import { appendAudit } from '../server/audit/log.ts';
 import { demonstrationRecords } from '../server/demonstration/cases.ts';
@@ -18,6 +19,8 @@ const today = `${now.getFullYear()}-${pad(now.getMonth() + 1)}-${pad(now.getDate
 const { db, pool } = openDatabase(connectionString);
 
 await db.transaction(async (tx) => {
+  // Two processes may find the database empty at once.
+  await tx.execute(sql`select pg_advisory_xact_lock(7281944)`);
   if ((await tx.select({ id: units.id }).from(units).limit(1)).length > 0) return;
   const [unit] = await tx
     .insert(units)

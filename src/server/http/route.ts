@@ -6,6 +6,7 @@ import type { Result } from '../../domain/result.ts';
 import type { Visit } from '../accounts/visit.ts';
 import { log } from './log.ts';
 import { json, refuse } from './refusals.ts';
+import { unstorable } from './storable.ts';
 
 export interface Request<Input> {
   visit: Visit;
@@ -30,11 +31,10 @@ const readBody = async <Input>(
 ): Promise<Result<Input, ApiError>> => {
   const body: unknown = await request.json().catch(() => undefined);
   const parsed = schema.safeParse(body);
-  if (parsed.success) return { ok: true, value: parsed.data };
-  const issues = parsed.error.issues.map(({ path, message }) => ({
-    path: path.map(String).join('.'),
-    message,
-  }));
+  const issues = parsed.success
+    ? unstorable(parsed.data)
+    : parsed.error.issues.map(({ path, message }) => ({ path: path.map(String).join('.'), message }));
+  if (parsed.success && issues.length === 0) return { ok: true, value: parsed.data };
   return { ok: false, error: { code: 'invalid', message: 'Some of this cannot be kept as it is.', issues } };
 };
 
@@ -79,7 +79,11 @@ export const route =
       return await answer(spec, context);
     } catch (error) {
       log().error(
-        { route: context.routePattern, error: error instanceof Error ? error.name : 'unknown' },
+        {
+          request: context.locals.requestId,
+          route: context.routePattern,
+          error: error instanceof Error ? error.name : 'unknown',
+        },
         'a route failed',
       );
       return refuse({ code: 'failed', message: 'This did not work. Nothing was changed; try again.' });
