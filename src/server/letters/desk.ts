@@ -1,4 +1,4 @@
-import { and, asc, count, desc, eq } from 'drizzle-orm';
+import { and, asc, count, desc, eq, type SQL, sql } from 'drizzle-orm';
 import type { Database } from '../../db/client.ts';
 import { cases, letters, recipients, signedVersions } from '../../db/schema.ts';
 import type { CaseRecord } from '../../domain/record/schema.ts';
@@ -38,11 +38,34 @@ export const letterCounts = async (db: Database, unitId: string): Promise<Record
   return counts;
 };
 
-/** Letters in one state: what waits the oldest first, what was sent the newest first. */
-export const lettersIn = async (db: Database, unitId: string, state: LetterState): Promise<LetterLine[]> => {
+const UUID = /^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/;
+
+/** Where the page after a letter begins: its own place in the order, asked of the database, which knows it to the microsecond. */
+const beyond = (state: LetterState, after: string | null): SQL | undefined => {
+  if (after === null || !UUID.test(after)) return undefined;
+  const key = state === 'sent' ? letters.sentAt : letters.createdAt;
+  const sign = state === 'sent' ? sql`<` : sql`>`;
+  return sql`(${key}, ${letters.id}) ${sign} (select ${sql.identifier(key.name)}, id from letters where id = ${after})`;
+};
+
+/**
+ * Letters in one state, a page at a time: what waits the oldest first, what was sent the newest first.
+ * @param after id of the last letter of the page before
+ */
+export const lettersIn = async (
+  db: Database,
+  unitId: string,
+  state: LetterState,
+  after: string | null = null,
+): Promise<{ lines: LetterLine[]; next: string | null }> => {
+  const order =
+    state === 'sent' ? [desc(letters.sentAt), desc(letters.id)] : [asc(letters.createdAt), asc(letters.id)];
   const rows = await db
     .select({
-      letter: letters,
+      id: letters.id,
+      kind: letters.kind,
+      lastError: letters.lastError,
+      sentAt: letters.sentAt,
       record: cases.record,
       signedAt: signedVersions.signedAt,
       recipient: recipients.name,
@@ -51,17 +74,13 @@ export const lettersIn = async (db: Database, unitId: string, state: LetterState
     .innerJoin(signedVersions, eq(letters.signedVersionId, signedVersions.id))
     .innerJoin(cases, eq(signedVersions.caseId, cases.id))
     .leftJoin(recipients, eq(letters.recipientId, recipients.id))
-    .where(and(eq(cases.unitId, unitId), eq(letters.state, state)))
-    .orderBy(state === 'sent' ? desc(letters.sentAt) : asc(letters.createdAt), asc(letters.id))
-    .limit(LETTERS_PER_PAGE);
-  return rows.map(({ letter, record, signedAt, recipient }) => ({
-    id: letter.id,
-    kind: letter.kind,
+    .where(and(eq(cases.unitId, unitId), eq(letters.state, state), beyond(state, after)))
+    .orderBy(...order)
+    .limit(LETTERS_PER_PAGE + 1);
+  const lines = rows.slice(0, LETTERS_PER_PAGE).map(({ record, ...line }) => ({
+    ...line,
     patient: nameOf(record),
     eye: record.who?.eye ?? '',
-    signedAt,
-    recipient,
-    lastError: letter.lastError,
-    sentAt: letter.sentAt,
   }));
+  return { lines, next: rows.length > LETTERS_PER_PAGE ? (lines.at(-1)?.id ?? null) : null };
 };
