@@ -138,6 +138,11 @@ export const readTheatreList = (csv: string): TheatreList => {
   const [header, ...lines] = parsed.data;
   if (header === undefined)
     return { rows: [], error: 'The file is empty. It needs a header line and one line a case.' };
+  const open = parsed.errors.find(({ type }) => type === 'Quotes');
+  if (open !== undefined) {
+    const line = (open.row ?? 0) + 1;
+    return { rows: [], error: `Line ${line}: a quotation mark is not closed or stands in the wrong place.` };
+  }
   const names = header.map((name) => name.trim().toLowerCase());
   const missing = required.filter((column) => !names.includes(column));
   if (missing.length > 0) {
@@ -149,6 +154,14 @@ export const readTheatreList = (csv: string): TheatreList => {
       columns.map((column) => [column, (values[names.indexOf(column)] ?? '').trim()]),
     ) as Record<Column, string>;
     const row = readRow(cells, index + 2);
+    if (values.length > names.length) {
+      delete row.case;
+      const column = columns.find((one) => one === names.at(-1)) ?? 'date';
+      row.errors.push({
+        column,
+        message: 'This line has more cells than the header; put words with a comma in quotation marks',
+      });
+    }
     const key = `${cells.date} ${cells['record number']} ${cells.eye}`.toLowerCase();
     const earlier = seen.get(key);
     if (earlier === undefined) seen.set(key, row.line);

@@ -1,6 +1,6 @@
 import { and, asc, eq, max, sql } from 'drizzle-orm';
 import type { Database } from '../../db/client.ts';
-import { cases, people } from '../../db/schema.ts';
+import { caseRevisions, cases, people, units } from '../../db/schema.ts';
 import type { CaseState } from '../../domain/access/policy.ts';
 import type { CaseRecord, Eye } from '../../domain/record/schema.ts';
 import type { ListedCase } from '../../domain/theatre-list/read-csv.ts';
@@ -59,35 +59,50 @@ export const casesOn = async (db: Database, unitId: string, listDate: string): P
   return rows.map(lineOf);
 };
 
-/** Puts cases on the list, all or none. A case that is there already (same day, record number and eye) is left alone. */
+/** Whether the same case (day, record number and eye) is on the list. */
+export const isListed = async (
+  db: Database,
+  unitId: string,
+  { listDate, record }: ListedCase,
+): Promise<boolean> => {
+  const same = await db
+    .select({ id: cases.id })
+    .from(cases)
+    .where(
+      and(
+        eq(cases.unitId, unitId),
+        eq(cases.listDate, listDate),
+        sql`${cases.record} #>> '{who,patient,number}' = ${record.who?.patient?.number ?? ''}`,
+        sql`${cases.record} #>> '{who,eye}' is not distinct from ${record.who?.eye ?? null}`,
+      ),
+    )
+    .limit(1);
+  return same.length > 0;
+};
+
+/** Puts cases on the list, all or none. A case that is there already is left alone, also when two people add it at once. */
 export const addCases = (
   db: Database,
-  actor: Actor,
+  actor: Actor & { personId: string },
   listed: readonly ListedCase[],
 ): Promise<{ added: number; alreadyThere: number }> =>
   db.transaction(async (tx) => {
+    // One at a time for a unit: who comes second sees what the first has added.
+    await tx.select({ id: units.id }).from(units).where(eq(units.id, actor.unitId)).for('no key update');
     let added = 0;
-    for (const { listDate, position, record } of listed) {
-      const same = await tx
-        .select({ id: cases.id })
-        .from(cases)
-        .where(
-          and(
-            eq(cases.unitId, actor.unitId),
-            eq(cases.listDate, listDate),
-            sql`${cases.record} #>> '{who,patient,number}' = ${record.who?.patient?.number ?? ''}`,
-            sql`${cases.record} #>> '{who,eye}' is not distinct from ${record.who?.eye ?? null}`,
-          ),
-        );
-      if (same.length > 0) continue;
+    for (const one of listed) {
+      if (await isListed(tx, actor.unitId, one)) continue;
+      const { listDate, position, record } = one;
       const [row] = await tx
         .insert(cases)
         .values({ unitId: actor.unitId, listDate, position, record, savedBy: actor.personId })
         .returning({ id: cases.id });
-      if (row !== undefined) {
-        await appendAudit(tx, actor, 'case:listed', row.id, { listDate });
-        added += 1;
-      }
+      if (row === undefined) continue;
+      await tx
+        .insert(caseRevisions)
+        .values({ caseId: row.id, revision: 1, record, answers: [], savedBy: actor.personId });
+      await appendAudit(tx, actor, 'case:listed', row.id, { listDate });
+      added += 1;
     }
     return { added, alreadyThere: listed.length - added };
   });
