@@ -7,9 +7,18 @@ export interface FormErrors {
   typed: Readonly<Record<string, string>>;
 }
 
+/** What was typed; of a field that was sent several times, all of it with spaces between. Passwords are not given back. */
 export const typedIn = (sent: FormData): Record<string, string> =>
   Object.fromEntries(
-    [...sent].flatMap(([name, value]) => (typeof value === 'string' ? [[name, value]] : [])),
+    [...new Set(sent.keys())]
+      .filter((name) => name !== 'password')
+      .map((name) => [
+        name,
+        sent
+          .getAll(name)
+          .filter((value) => typeof value === 'string')
+          .join(' '),
+      ]),
   );
 
 /** Reads a form by a schema; fields that may be sent several times are given by name. */
@@ -18,11 +27,18 @@ export const readForm = <T>(
   sent: FormData,
   lists: readonly string[] = [],
 ): Result<T, FormErrors> => {
-  const typed = typedIn(sent);
+  const texts = Object.fromEntries(
+    [...sent].flatMap(([name, value]) => (typeof value === 'string' ? [[name, value]] : [])),
+  );
   const many = Object.fromEntries(lists.map((name) => [name, sent.getAll(name).map(String)]));
-  const parsed = schema.safeParse({ ...typed, ...many });
+  const parsed = schema.safeParse({ ...texts, ...many });
   if (parsed.success) return ok(parsed.data);
   const errors: Record<string, string> = {};
   for (const { path, message } of parsed.error.issues) errors[String(path[0])] ??= message;
-  return { ok: false, error: { errors, typed } };
+  return { ok: false, error: { errors, typed: typedIn(sent) } };
 };
+
+const UUID = /^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/;
+
+/** Whether a form can mean a row at all. */
+export const isId = (text: string): boolean => UUID.test(text);

@@ -78,3 +78,20 @@ describe('readTheatreList', () => {
     expect(list().error).toMatch(/no cases/);
   });
 });
+
+describe('a file that does not hold together', () => {
+  it('is refused whole when a quotation mark is left open: no line may vanish into another', () => {
+    const { rows, error } = list(
+      '2026-12-01,1,DEMO-1,"Oakhollow,Maren,1961-03-14,left,,',
+      '2026-12-01,2,DEMO-2,A,B,1950-01-02,left,,',
+    );
+    expect(rows).toEqual([]);
+    expect(error).toContain('quotation mark');
+  });
+
+  it('says which line has more cells than the header', () => {
+    const { rows } = list('2026-12-01,1,DEMO-1,Oakhollow,Maren,1961-03-14,left,,latex, penicillin');
+    expect(rows[0]?.case).toBeUndefined();
+    expect(rows[0]?.errors[0]?.message).toContain('more cells than the header');
+  });
+});
