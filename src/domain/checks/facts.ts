@@ -1,5 +1,5 @@
 import type { ClockArc } from '../anatomy/clock.ts';
-import { dateWords, labelOf, listWords, numberWords, timesWords } from '../drafting/words.ts';
+import { dateWords, labelOf, listWords, numberWords, timesWords, withArticle } from '../drafting/words.ts';
 import { isGas } from '../physics/gas.ts';
 import type {
   BuckleElement,
@@ -79,7 +79,7 @@ export const ageOf = (record: CaseRecord): number | undefined => {
 export const elementName = (element: BuckleElement, index: number): string =>
   element.role === 'encircling' ? 'The band' : `Element ${index + 1}`;
 
-export { dateWords, labelOf, listWords, numberWords, timesWords };
+export { dateWords, labelOf, listWords, numberWords, timesWords, withArticle };
 
 /** Where the retina is detached: an arc, the whole round, or `undefined` while it is not recorded. */
 export const detachedArcOf = (record: CaseRecord): ClockArc | 'all' | undefined => {

@@ -55,11 +55,13 @@ import { rule as concentrationLow } from './rules/concentration-low/rule.ts';
 import { rule as conjunctivaOpenedNotClosed } from './rules/conjunctiva-opened-not-closed/rule.ts';
 import { rule as countDiscrepancyOpen } from './rules/count-discrepancy-open/rule.ts';
 import { rule as countsCorrectWithDiscrepancy } from './rules/counts-correct-with-discrepancy/rule.ts';
+import { rule as cryoAllRound } from './rules/cryo-all-round/rule.ts';
 import { rule as dateOutOfOrder } from './rules/date-out-of-order/rule.ts';
 import { rule as detachmentLeftOpen } from './rules/detachment-left-open/rule.ts';
 import { rule as detachmentSurgeryRepeated } from './rules/detachment-surgery-repeated/rule.ts';
 import { rule as detachmentWithoutDetachment } from './rules/detachment-without-detachment/rule.ts';
 import { rule as diagnosisAgainstBreaks } from './rules/diagnosis-against-breaks/rule.ts';
+import { rule as diagnosisChangedUnexplained } from './rules/diagnosis-changed-unexplained/rule.ts';
 import { rule as dialysisOffTheOra } from './rules/dialysis-off-the-ora/rule.ts';
 import { rule as dilutionWrong } from './rules/dilution-wrong/rule.ts';
 import { rule as discNotPerfusedAtEnd } from './rules/disc-not-perfused-at-end/rule.ts';
@@ -77,6 +79,7 @@ import { rule as earlierSurgeryOnOtherEyeOnly } from './rules/earlier-surgery-on
 import { rule as elementAwayFromBreak } from './rules/element-away-from-break/rule.ts';
 import { rule as elementFixedByNothing } from './rules/element-fixed-by-nothing/rule.ts';
 import { rule as elementOfImpossibleSize } from './rules/element-of-impossible-size/rule.ts';
+import { rule as elementRemovalFarOff } from './rules/element-removal-far-off/rule.ts';
 import { rule as elementSupportsNothing } from './rules/element-supports-nothing/rule.ts';
 import { rule as elementWithoutFixation } from './rules/element-without-fixation/rule.ts';
 import { rule as elementWithoutFrontEdge } from './rules/element-without-front-edge/rule.ts';
@@ -99,6 +102,7 @@ import { rule as fixedDateForFlying } from './rules/fixed-date-for-flying/rule.t
 import { rule as flatOnBackWithGas } from './rules/flat-on-back-with-gas/rule.ts';
 import { rule as fluidAgainstFlat } from './rules/fluid-against-flat/rule.ts';
 import { rule as fluidLeftWhereMissing } from './rules/fluid-left-where-missing/rule.ts';
+import { rule as fluidWithoutDetachment } from './rules/fluid-without-detachment/rule.ts';
 import { rule as flyingBeforeGasGone } from './rules/flying-before-gas-gone/rule.ts';
 import { rule as followUpBeforeSurgery } from './rules/follow-up-before-surgery/rule.ts';
 import { rule as formAgainstMaterial } from './rules/form-against-material/rule.ts';
@@ -117,9 +121,11 @@ import { rule as heavyLiquidLeft } from './rules/heavy-liquid-left/rule.ts';
 import { rule as heavyLiquidLeftLong } from './rules/heavy-liquid-left-long/rule.ts';
 import { rule as heavyLiquidUnderRetinaNotUsed } from './rules/heavy-liquid-under-retina-not-used/rule.ts';
 import { rule as heavyLiquidUseNotRecorded } from './rules/heavy-liquid-use-not-recorded/rule.ts';
+import { rule as heavyLiquidVolumeUnusual } from './rules/heavy-liquid-volume-unusual/rule.ts';
 import { rule as heavyOilBreaksAbove } from './rules/heavy-oil-breaks-above/rule.ts';
 import { rule as heavyOilFaceDown } from './rules/heavy-oil-face-down/rule.ts';
 import { rule as heightAboveBound } from './rules/height-above-bound/rule.ts';
+import { rule as heightUnusual } from './rules/height-unusual/rule.ts';
 import { rule as highPressureWithoutPerfusion } from './rules/high-pressure-without-perfusion/rule.ts';
 import { rule as horseshoeWithVitreousAttached } from './rules/horseshoe-with-vitreous-attached/rule.ts';
 import { rule as hyaloidAgainstBefore } from './rules/hyaloid-against-before/rule.ts';
@@ -129,7 +135,9 @@ import { rule as implantPowerUnusual } from './rules/implant-power-unusual/rule.
 import { rule as implantWithTightenedBand } from './rules/implant-with-tightened-band/rule.ts';
 import { rule as implantWithoutLot } from './rules/implant-without-lot/rule.ts';
 import { rule as injectionLarge } from './rules/injection-large/rule.ts';
+import { rule as injectionWithoutVolume } from './rules/injection-without-volume/rule.ts';
 import { rule as internalDrainageWithoutVitrectomy } from './rules/internal-drainage-without-vitrectomy/rule.ts';
+import { rule as keratometryUnusual } from './rules/keratometry-unusual/rule.ts';
 import { rule as largeFillVolumeMismatch } from './rules/large-fill-volume-mismatch/rule.ts';
 import { rule as lastingClosureTemporaryBand } from './rules/lasting-closure-temporary-band/rule.ts';
 import { rule as lateReview } from './rules/late-review/rule.ts';
@@ -184,14 +192,17 @@ import { rule as pneumaticWithVitrectomy } from './rules/pneumatic-with-vitrecto
 import { rule as portsUnusual } from './rules/ports-unusual/rule.ts';
 import { rule as postureHoursDoNotAddUp } from './rules/posture-hours-do-not-add-up/rule.ts';
 import { rule as postureLeavesBreakDry } from './rules/posture-leaves-break-dry/rule.ts';
+import { rule as postureOfNoTime } from './rules/posture-of-no-time/rule.ts';
 import { rule as postureOnWrongSide } from './rules/posture-on-wrong-side/rule.ts';
 import { rule as postureOutlastsGas } from './rules/posture-outlasts-gas/rule.ts';
 import { rule as postureWithoutDuration } from './rules/posture-without-duration/rule.ts';
 import { rule as postureWithoutPosition } from './rules/posture-without-position/rule.ts';
 import { rule as postureWithoutTamponade } from './rules/posture-without-tamponade/rule.ts';
 import { rule as preoperativeDiagnosisNotBorneOut } from './rules/preoperative-diagnosis-not-borne-out/rule.ts';
+import { rule as prescribedForNoTime } from './rules/prescribed-for-no-time/rule.ts';
 import { rule as prescribedTwice } from './rules/prescribed-twice/rule.ts';
 import { rule as pressureAtEnd } from './rules/pressure-at-end/rule.ts';
+import { rule as pressureBeforeUnusual } from './rules/pressure-before-unusual/rule.ts';
 import { rule as previousOperationIncomplete } from './rules/previous-operation-incomplete/rule.ts';
 import { rule as pseudophakicWithoutCataractSurgery } from './rules/pseudophakic-without-cataract-surgery/rule.ts';
 import { rule as pureGasAtFullFill } from './rules/pure-gas-at-full-fill/rule.ts';
@@ -200,8 +211,8 @@ import { rule as pvrExtentMissing } from './rules/pvr-extent-missing/rule.ts';
 import { rule as pvrGradeOfOtherEdition } from './rules/pvr-grade-of-other-edition/rule.ts';
 import { rule as pvrHoursWithoutGradeC } from './rules/pvr-hours-without-grade-c/rule.ts';
 import { rule as pvrMembranesWithoutPvr } from './rules/pvr-membranes-without-pvr/rule.ts';
-import { rule as pvrNotGraded } from './rules/pvr-not-graded/rule.ts';
 import { rule as recurrenceWithoutHistory } from './rules/recurrence-without-history/rule.ts';
+import { rule as referredBeforeSymptoms } from './rules/referred-before-symptoms/rule.ts';
 import { rule as referrerMissing } from './rules/referrer-missing/rule.ts';
 import { rule as referrerWithoutName } from './rules/referrer-without-name/rule.ts';
 import { rule as refractionAgainstAxialLength } from './rules/refraction-against-axial-length/rule.ts';
@@ -222,7 +233,9 @@ import { rule as retinopexyKindsDiffer } from './rules/retinopexy-kinds-differ/r
 import { rule as retinopexyOfMissingBreak } from './rules/retinopexy-of-missing-break/rule.ts';
 import { rule as retinopexySettingsAgainstKind } from './rules/retinopexy-settings-against-kind/rule.ts';
 import { rule as retinopexySettingsUnusual } from './rules/retinopexy-settings-unusual/rule.ts';
+import { rule as retinotomyTreatedWithoutRetinopexy } from './rules/retinotomy-treated-without-retinopexy/rule.ts';
 import { rule as retinotomyUntreated } from './rules/retinotomy-untreated/rule.ts';
+import { rule as reviewBeforeEnd } from './rules/review-before-end/rule.ts';
 import { rule as reviewDatesDiffer } from './rules/review-dates-differ/rule.ts';
 import { rule as sclerotomiesOffParsPlana } from './rules/sclerotomies-off-pars-plana/rule.ts';
 import { rule as segmentFarFromUsualPlace } from './rules/segment-far-from-usual-place/rule.ts';
@@ -232,6 +245,7 @@ import { rule as shortenedTooMuch } from './rules/shortened-too-much/rule.ts';
 import { rule as shortenedWithoutRing } from './rules/shortened-without-ring/rule.ts';
 import { rule as sideDiffers } from './rules/side-differs/rule.ts';
 import { rule as siliconeImplantWithOil } from './rules/silicone-implant-with-oil/rule.ts';
+import { rule as slitLampLaserAsleep } from './rules/slit-lamp-laser-asleep/rule.ts';
 import { rule as smallHyperopicEye } from './rules/small-hyperopic-eye/rule.ts';
 import { rule as specimenIncomplete } from './rules/specimen-incomplete/rule.ts';
 import { rule as supervisionIncomplete } from './rules/supervision-incomplete/rule.ts';
@@ -261,6 +275,7 @@ import { rule as underBandWithoutBand } from './rules/under-band-without-band/ru
 import { rule as untreatedBreakAmongTargets } from './rules/untreated-break-among-targets/rule.ts';
 import { rule as vitrectomyDetailsWithoutVitrectomy } from './rules/vitrectomy-details-without-vitrectomy/rule.ts';
 import { rule as vitrectomyIncomplete } from './rules/vitrectomy-incomplete/rule.ts';
+import { rule as vitrectomyStepsNotApplicable } from './rules/vitrectomy-steps-not-applicable/rule.ts';
 import { rule as warningSignsLeftOut } from './rules/warning-signs-left-out/rule.ts';
 import { rule as widePortsSutureless } from './rules/wide-ports-sutureless/rule.ts';
 import { rule as wristbandNotGiven } from './rules/wristband-not-given/rule.ts';
@@ -326,11 +341,13 @@ export const rules: readonly Rule[] = [
   conjunctivaOpenedNotClosed,
   countDiscrepancyOpen,
   countsCorrectWithDiscrepancy,
+  cryoAllRound,
   dateOutOfOrder,
   detachmentLeftOpen,
   detachmentSurgeryRepeated,
   detachmentWithoutDetachment,
   diagnosisAgainstBreaks,
+  diagnosisChangedUnexplained,
   dialysisOffTheOra,
   dilutionWrong,
   discNotPerfusedAtEnd,
@@ -348,6 +365,7 @@ export const rules: readonly Rule[] = [
   elementAwayFromBreak,
   elementFixedByNothing,
   elementOfImpossibleSize,
+  elementRemovalFarOff,
   elementSupportsNothing,
   elementWithoutFixation,
   elementWithoutFrontEdge,
@@ -370,6 +388,7 @@ export const rules: readonly Rule[] = [
   flatOnBackWithGas,
   fluidAgainstFlat,
   fluidLeftWhereMissing,
+  fluidWithoutDetachment,
   flyingBeforeGasGone,
   followUpBeforeSurgery,
   formAgainstMaterial,
@@ -388,9 +407,11 @@ export const rules: readonly Rule[] = [
   heavyLiquidLeftLong,
   heavyLiquidUnderRetinaNotUsed,
   heavyLiquidUseNotRecorded,
+  heavyLiquidVolumeUnusual,
   heavyOilBreaksAbove,
   heavyOilFaceDown,
   heightAboveBound,
+  heightUnusual,
   highPressureWithoutPerfusion,
   horseshoeWithVitreousAttached,
   hyaloidAgainstBefore,
@@ -400,7 +421,9 @@ export const rules: readonly Rule[] = [
   implantWithTightenedBand,
   implantWithoutLot,
   injectionLarge,
+  injectionWithoutVolume,
   internalDrainageWithoutVitrectomy,
+  keratometryUnusual,
   largeFillVolumeMismatch,
   lastingClosureTemporaryBand,
   lateReview,
@@ -455,14 +478,17 @@ export const rules: readonly Rule[] = [
   portsUnusual,
   postureHoursDoNotAddUp,
   postureLeavesBreakDry,
+  postureOfNoTime,
   postureOnWrongSide,
   postureOutlastsGas,
   postureWithoutDuration,
   postureWithoutPosition,
   postureWithoutTamponade,
   preoperativeDiagnosisNotBorneOut,
+  prescribedForNoTime,
   prescribedTwice,
   pressureAtEnd,
+  pressureBeforeUnusual,
   previousOperationIncomplete,
   pseudophakicWithoutCataractSurgery,
   pureGasAtFullFill,
@@ -471,8 +497,8 @@ export const rules: readonly Rule[] = [
   pvrGradeOfOtherEdition,
   pvrHoursWithoutGradeC,
   pvrMembranesWithoutPvr,
-  pvrNotGraded,
   recurrenceWithoutHistory,
+  referredBeforeSymptoms,
   referrerMissing,
   referrerWithoutName,
   refractionAgainstAxialLength,
@@ -493,7 +519,9 @@ export const rules: readonly Rule[] = [
   retinopexyOfMissingBreak,
   retinopexySettingsAgainstKind,
   retinopexySettingsUnusual,
+  retinotomyTreatedWithoutRetinopexy,
   retinotomyUntreated,
+  reviewBeforeEnd,
   reviewDatesDiffer,
   sclerotomiesOffParsPlana,
   segmentFarFromUsualPlace,
@@ -503,6 +531,7 @@ export const rules: readonly Rule[] = [
   shortenedWithoutRing,
   sideDiffers,
   siliconeImplantWithOil,
+  slitLampLaserAsleep,
   smallHyperopicEye,
   specimenIncomplete,
   supervisionIncomplete,
@@ -532,6 +561,7 @@ export const rules: readonly Rule[] = [
   untreatedBreakAmongTargets,
   vitrectomyDetailsWithoutVitrectomy,
   vitrectomyIncomplete,
+  vitrectomyStepsNotApplicable,
   warningSignsLeftOut,
   widePortsSutureless,
   wristbandNotGiven,

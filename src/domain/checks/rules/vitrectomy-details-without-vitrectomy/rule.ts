@@ -12,14 +12,22 @@ export const rule = defineRule({
   check: (record) => {
     const { vitreous } = record;
     if (vitreous?.vitrectomy !== false) return [];
+    const { ports, gauge, heavyLiquid: liquid } = vitreous;
     const peeled = (vitreous.membranesPeeled ?? []).filter((one) => one !== 'none');
     const steps = [
-      numberIn(vitreous.ports) !== undefined && vitreous.ports !== 0
-        ? { field: 'vitreous.ports', what: `${vitreous.ports} ports` }
+      numberIn(ports) !== undefined && ports !== 0
+        ? { field: 'vitreous.ports', what: `${ports} ports` }
+        : undefined,
+      gauge !== undefined && gauge !== 'not-applicable'
+        ? { field: 'vitreous.gauge', what: `${gauge} gauge` }
+        : undefined,
+      vitreous.hyaloid === 'induced'
+        ? { field: 'vitreous.hyaloid', what: 'a detachment of the hyaloid induced' }
         : undefined,
       vitreous.baseShaved?.startsWith('shaved') === true
-        ? { field: 'vitreous.baseShaved', what: 'a shaved vitreous base' }
+        ? { field: 'vitreous.baseShaved', what: 'the vitreous base shaved' }
         : undefined,
+      Array.isArray(vitreous.dyes) ? { field: 'vitreous.dyes', what: 'a dye' } : undefined,
       peeled.length > 0
         ? {
             field: 'vitreous.membranesPeeled',
@@ -29,11 +37,8 @@ export const rule = defineRule({
       retinotomiesOf(record).length > 0
         ? { field: 'vitreous.retinotomies', what: 'a retinotomy' }
         : undefined,
-      vitreous.heavyLiquid !== undefined && vitreous.heavyLiquid !== 'none'
-        ? {
-            field: 'vitreous.heavyLiquid',
-            what: `heavy liquid ${labelOf('vitreous.heavyLiquid', vitreous.heavyLiquid)}`,
-          }
+      liquid !== undefined && liquid !== 'none'
+        ? { field: 'vitreous.heavyLiquid', what: `heavy liquid ${labelOf('vitreous.heavyLiquid', liquid)}` }
         : undefined,
     ].filter((one) => one !== undefined);
     if (steps.length === 0) return [];
@@ -49,15 +54,30 @@ export const rule = defineRule({
       {
         name: 'membranes peeled',
         fields: 'vitreous.vitrectomy',
-        record: { vitreous: { vitrectomy: false, membranesPeeled: ['epiretinal'] } },
+        record: { vitreous: { vitrectomy: false, membranesPeeled: ['ilm'] } },
+      },
+      {
+        name: 'a gauge',
+        fields: 'vitreous.vitrectomy',
+        record: { vitreous: { vitrectomy: false, gauge: '25' } },
       },
     ],
     silent: [
+      { name: 'vitrectomy', record: { vitreous: { vitrectomy: true, membranesPeeled: ['ilm'] } } },
       {
-        name: 'nothing of it',
-        record: { vitreous: { vitrectomy: false, ports: 'not-applicable', heavyLiquid: 'none' } },
+        name: 'buckle',
+        record: {
+          vitreous: {
+            vitrectomy: false,
+            membranesPeeled: ['none'],
+            heavyLiquid: 'none',
+            gauge: 'not-applicable',
+            dyes: 'none',
+            retinotomies: 'none',
+          },
+        },
       },
     ],
-    unknown: [{ name: 'vitrectomy not recorded', record: { vitreous: { ports: 3 } } }],
+    unknown: [{ name: 'vitrectomy not recorded', record: { vitreous: { membranesPeeled: ['ilm'] } } }],
   },
 });
