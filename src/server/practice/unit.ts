@@ -12,7 +12,7 @@ const form = z.object({
   service: z.string().trim().min(2, 'Write the service').max(200),
   address: z.string().trim().min(5, 'Write the address').max(500),
   telephone: z.string().trim().min(3, 'Write the telephone number').max(50),
-  email: z.email('Write an e-mail address, like name@example.org').max(200),
+  email: z.string().trim().max(200).pipe(z.email('Write an e-mail address, like name@example.org')),
 });
 
 /** Changes the letterhead; notes that are signed keep the one that they were signed with. */
@@ -20,11 +20,12 @@ export const saveUnit = async (visit: Visit, sent: FormData): Promise<Result<nul
   const read = readForm(form, sent);
   if (!read.ok) return read;
   await database().transaction(async (tx) => {
-    await tx
+    const [row] = await tx
       .update(units)
       .set({ ...read.value, version: sql`${units.version} + 1` })
-      .where(eq(units.id, visit.unit.id));
-    await appendAudit(tx, actorOf(visit), 'unit:changed', visit.unit.id);
+      .where(eq(units.id, visit.unit.id))
+      .returning({ version: units.version });
+    await appendAudit(tx, actorOf(visit), 'unit:changed', visit.unit.id, { version: row?.version ?? 0 });
   });
   return ok(null);
 };
