@@ -129,7 +129,7 @@ describe('the proof of a note', () => {
     [
       'an addendum and its hash',
       [
-        `update addenda set canonical = replace(canonical, 'first', 'third') where number = 1`,
+        `update addenda set canonical = replace(canonical, 'Came up later', 'Known before') where number = 1`,
         `update addenda set sha256 = ${hex('canonical')} where number = 1`,
       ],
       [added],
