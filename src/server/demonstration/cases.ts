@@ -1,5 +1,6 @@
 import type { Procedure } from '../../domain/record/procedures.ts';
 import type { CaseRecord, Eye } from '../../domain/record/schema.ts';
+import { nearlyComplete } from './nearly-complete.ts';
 
 interface Invented {
   familyName: string;
@@ -192,8 +193,8 @@ const recordOf = (one: Invented): CaseRecord => ({
 });
 
 /** The demonstration's theatre list of a day, YYYY-MM-DD. */
-export const demonstrationRecords = (day: string): CaseRecord[] =>
-  invented.map((one, index) => {
+export const demonstrationRecords = (day: string): CaseRecord[] => [
+  ...invented.map((one, index): CaseRecord => {
     const record = recordOf(one);
     if (index > 0) return record;
     return {
@@ -214,4 +215,6 @@ export const demonstrationRecords = (day: string): CaseRecord[] =>
         theatre: 'Theatre 2',
       },
     };
-  });
+  }),
+  { version: 1, ...nearlyComplete(day) },
+];
